@@ -1,0 +1,114 @@
+import { QueryTypes } from 'sequelize';
+import type { z } from 'zod';
+import type { openCardRequest } from '#shared/contracts/card.ts';
+import { describeCastingState } from '#shared/domain/casting/casting-state.ts';
+import { freshCard } from '#shared/domain/pour-card/card-state.ts';
+import { buildCode } from '#shared/lib/codes.ts';
+import { AppError } from '../errors.ts';
+import type { Melt } from '../models/melt.ts';
+import type { AtTerminal } from '../policies/actor.ts';
+import { cardContextOf } from '../queries/card-context.ts';
+import { loadCasting, type LoadedCasting } from '../queries/load-casting.ts';
+import { loadInstruction } from '../queries/load-instruction.ts';
+import { loadStudio } from '../queries/load-studio.ts';
+import type { Services } from '../services/services.ts';
+import { appendEvent } from './append-event.ts';
+import { occurredBetween } from './occurred-between.ts';
+
+type OpenCard = z.output<typeof openCardRequest>;
+
+/** Someone else has the flask: says who, and where. */
+const elsewhere = async ({ models }: Services, melt: Melt): Promise<AppError> => {
+  const [user, terminal] = await Promise.all([
+    models.User.findByPk(melt.openedBy),
+    models.Terminal.findByPk(melt.terminalId),
+  ]);
+  const sentence = `${user?.name} has this flask at ${terminal?.name}. Ask there, or choose another flask.`;
+  return new AppError('card-elsewhere', sentence);
+};
+
+/** Goes on with an open card: at the terminal that holds it, or taken along by the person who opened it. */
+const carryOn = async (
+  services: Services,
+  actor: AtTerminal,
+  melt: Melt,
+  request: OpenCard,
+): Promise<Melt> => {
+  const holdsIt = melt.terminalId === actor.terminal.id;
+  const mayTakeAlong = request.carryOn && melt.openedBy === actor.person.id;
+  if (!holdsIt && !mayTakeAlong) throw await elsewhere(services, melt);
+  if (holdsIt && melt.openedBy === actor.person.id) return melt;
+  await melt.update({ terminalId: actor.terminal.id, openedBy: actor.person.id });
+  await appendEvent(services, actor, melt, { ...request, event: { type: 'carried-on' } });
+  return melt;
+};
+
+const nextMeltNumber = async ({ sequelize }: Services): Promise<number> => {
+  const rows = await sequelize.query<{ number: number }>(`select nextval('melt_numbers')::int as number`, {
+    type: QueryTypes.SELECT,
+  });
+  if (!rows[0]) throw new Error('The sequence of melt numbers gave none.');
+  return rows[0].number;
+};
+
+const refuseUnready = ({ state, alloyRevision }: LoadedCasting): void => {
+  if (state !== 'holding') {
+    throw new AppError(
+      'wrong-state',
+      `This flask is ${describeCastingState(state)}. A card opens when the flask is holding.`,
+    );
+  }
+  if (alloyRevision.status !== 'approved') {
+    throw new AppError(
+      'alloy-not-approved',
+      `Revision ${alloyRevision.number} of ${alloyRevision.alloy.name} is not approved. Ask the owner to approve it or to plan another.`,
+    );
+  }
+};
+
+const begin = async (
+  services: Services,
+  actor: AtTerminal,
+  casting: LoadedCasting,
+  request: OpenCard,
+): Promise<Melt> => {
+  refuseUnready(casting);
+  const studio = await loadStudio(services);
+  const instruction = await loadInstruction(services);
+  const number = await nextMeltNumber(services);
+  const melt = await services.models.Melt.create({
+    number,
+    code: buildCode('M', number),
+    castingId: casting.id,
+    alloyRevisionId: casting.alloyRevisionId,
+    workInstructionRevisionId: instruction.id,
+    context: cardContextOf(casting, studio),
+    state: freshCard,
+    openedBy: actor.person.id,
+    terminalId: actor.terminal.id,
+    openedAt: occurredBetween(request.occurredAt, null, services.now()),
+  });
+  await casting.update({ meltId: melt.id });
+  await appendEvent(services, actor, melt, { ...request, event: { type: 'card-opened' } });
+  return melt;
+};
+
+/**
+ * Opens a casting's card at this terminal, or goes on with it. The casting's row is locked meanwhile, so that of two
+ * terminals one gets the flask and the other is told who has it.
+ */
+export const openCard = (
+  services: Services,
+  actor: AtTerminal,
+  castingId: string,
+  request: OpenCard,
+): Promise<Melt> =>
+  services.sequelize.transaction(async () => {
+    await services.models.Casting.findByPk(castingId, { lock: true });
+    const casting = await loadCasting(services, castingId);
+    const melt =
+      casting.meltId === null ? null : await services.models.Melt.findByPk(casting.meltId, { lock: true });
+    return melt && melt.overAt === null
+      ? carryOn(services, actor, melt, request)
+      : begin(services, actor, casting, request);
+  });

@@ -1,0 +1,70 @@
+import { isDeepStrictEqual } from 'node:util';
+import type { z } from 'zod';
+import type { recordEventRequest } from '#shared/contracts/card.ts';
+import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
+import { judgeReading } from '#shared/domain/pour-card/judge-reading.ts';
+import { AppError } from '../errors.ts';
+import type { Melt } from '../models/melt.ts';
+import type { MeltEvent } from '../models/melt-event.ts';
+import type { AtTerminal } from '../policies/actor.ts';
+import { meltPolicy } from '../policies/melt.ts';
+import { can } from '../policies/policy.ts';
+import type { Services } from '../services/services.ts';
+import { appendEvent } from './append-event.ts';
+
+type RecordEvent = z.output<typeof recordEventRequest>;
+
+/** Refuses what only a caster or the owner decides: to end a card, or to stand by a doubtful reading. */
+const refuseUndecided = (actor: AtTerminal, melt: Melt, event: CardEvent): void => {
+  const decides = event.type === 'abandoned' || (event.type === 'reading-taken' && event.confirmed);
+  if (!decides || can(meltPolicy.decide, actor, melt)) return;
+  throw new AppError('not-allowed', 'A caster or the owner has to decide this. Ask one to sign in here.');
+};
+
+/** Judges a reading as the terminal does, whatever the terminal did; returns it with `confirmed` only where it was needed. */
+const judged = (melt: Melt, event: CardEvent): CardEvent => {
+  if (event.type !== 'reading-taken') return event;
+  const verdict = judgeReading(event.temperatureC, 'C', melt.context.figures, melt.context.limits);
+  if (verdict.kind === 'refuse' || (verdict.kind === 'question' && !event.confirmed)) {
+    throw new AppError('reading-questioned', verdict.sentence);
+  }
+  return { ...event, confirmed: verdict.kind === 'question' };
+};
+
+/** An event that was delivered before: the one on record, refused when the key was used for something else. */
+const alreadyRecorded = async (
+  { models }: Services,
+  melt: Melt,
+  key: string,
+  event: CardEvent,
+): Promise<MeltEvent | null> => {
+  const recorded = await models.MeltEvent.findOne({ where: { key } });
+  if (!recorded) return null;
+  if (recorded.meltId === melt.id && isDeepStrictEqual(recorded.event, event)) return recorded;
+  throw new AppError(
+    'event-refused',
+    'This delivery carries the mark of another event. Scan the flask again.',
+  );
+};
+
+/** Records one event of a card, exactly once however often it is delivered. */
+export const recordEvent = (
+  services: Services,
+  actor: AtTerminal,
+  meltId: string,
+  request: RecordEvent,
+): Promise<MeltEvent> =>
+  services.sequelize.transaction(async () => {
+    const melt = await services.models.Melt.findByPk(meltId, { lock: true, rejectOnEmpty: true });
+    if (!can(meltPolicy.record, actor, melt)) {
+      throw new AppError(
+        'card-elsewhere',
+        'This card went on at another terminal meanwhile. Scan the flask to see who has it.',
+      );
+    }
+    const event = judged(melt, request.event);
+    const recorded = await alreadyRecorded(services, melt, request.key, event);
+    if (recorded) return recorded;
+    refuseUndecided(actor, melt, event);
+    return appendEvent(services, actor, melt, { ...request, event });
+  });

@@ -1,0 +1,7 @@
+import type { Request, Response } from 'express';
+
+/** A request with the response it will get. */
+export interface Http {
+  readonly request: Request;
+  readonly response: Response;
+}

@@ -1,0 +1,112 @@
+import type { RequestHandler } from 'express';
+import { Passport } from 'passport';
+import { Strategy } from 'passport-local';
+import { signInWithPassword } from '../commands/sign-in-with-password.ts';
+import { signInWithPin } from '../commands/sign-in-with-pin.ts';
+import type { Terminal } from '../models/terminal.ts';
+import type { User as StudioUser } from '../models/user.ts';
+import type { Actor } from '../policies/actor.ts';
+import type { Services } from '../services/services.ts';
+import type { Http } from './http.ts';
+import { placeOf } from './place.ts';
+import { terminalOf } from './terminal-token.ts';
+
+type PassportInstance = InstanceType<typeof Passport>;
+
+declare global {
+  // eslint-disable-next-line @typescript-eslint/no-namespace -- passport's types are extended by merging this namespace.
+  namespace Express {
+    interface User {
+      readonly id: string;
+      readonly name: string;
+      readonly roles: StudioUser['roles'];
+    }
+    interface Locals {
+      actor: Actor;
+      terminal: Terminal | null;
+      passport: PassportInstance;
+    }
+  }
+}
+
+const asUser = ({ id, name, roles }: StudioUser): Express.User => ({ id, name, roles });
+
+/** Passport with its two ways in: name and password at the desk, person and PIN at a terminal. */
+export const createPassport = (services: Services): PassportInstance => {
+  const passport = new Passport();
+  passport.use(
+    'password',
+    new Strategy({ usernameField: 'login', passwordField: 'password' }, (login, password, done) => {
+      signInWithPassword(services, { login, password }).then((user) => done(null, asUser(user)), done);
+    }),
+  );
+  passport.use(
+    'pin',
+    new Strategy({ usernameField: 'personId', passwordField: 'pin' }, (personId, pin, done) => {
+      signInWithPin(services, { personId, pin }).then((user) => done(null, asUser(user)), done);
+    }),
+  );
+  passport.serializeUser(({ id }, done) => done(null, id));
+  passport.deserializeUser((id: string, done) => {
+    services.models.User.findOne({ where: { id, active: true } }).then(
+      (user) => done(null, user ? asUser(user) : false),
+      done,
+    );
+  });
+  return passport;
+};
+
+/** Who is asking: a terminal's session counts only at the very terminal it was opened at. */
+const readActor = ({ request, response }: Http): Actor => {
+  const { terminal } = response.locals;
+  const place = placeOf(request);
+  const isHere = place === 'desk' || (terminal !== null && request.session.terminalId === terminal.id);
+  const person = isHere && request.user ? request.user : null;
+  return {
+    person,
+    terminal: terminal && { id: terminal.id, name: terminal.name, bay: terminal.bay },
+    via: person ? place : null,
+  };
+};
+
+/** Finds out who is asking and keeps it for the route. */
+export const identify =
+  (services: Services, passport: PassportInstance): RequestHandler =>
+  async (request, response, next) => {
+    response.locals.terminal = await terminalOf(request, services);
+    response.locals.passport = passport;
+    response.locals.actor = readActor({ request, response });
+    next();
+  };
+
+/** The actor as it stands after a sign-in or sign-out within this request. */
+export const actorOf = (http: Http): Actor => readActor(http);
+
+const authenticate = ({ request, response }: Http, strategy: 'password' | 'pin'): Promise<Express.User> =>
+  new Promise((resolve, reject) => {
+    const done = (error: unknown, user?: Express.User | false): void => {
+      if (user) resolve(user);
+      else reject(error instanceof Error ? error : new Error('Sign-in gave neither a person nor a reason.'));
+    };
+    const passport = response.locals.passport as PassportInstance;
+    (passport.authenticate(strategy, done) as RequestHandler)(request, response, reject);
+  });
+
+/** Signs in by one of the two ways; the session is renewed, so that one fixed beforehand is worth nothing. */
+export const signIn = async (strategy: 'password' | 'pin', http: Http): Promise<void> => {
+  const { request, response } = http;
+  const user = await authenticate(http, strategy);
+  await new Promise<void>((resolve, reject) => {
+    request.logIn(user, (error?: unknown) => (error ? reject(error as Error) : resolve()));
+  });
+  if (strategy === 'pin') request.session.terminalId = response.locals.terminal?.id;
+};
+
+/** Signs out and drops the session. */
+export const signOut = ({ request }: Http): Promise<void> =>
+  new Promise((resolve, reject) => {
+    request.logOut((error?: unknown) => {
+      if (error) return reject(error as Error);
+      request.session.destroy((failure?: unknown) => (failure ? reject(failure as Error) : resolve()));
+    });
+  });

@@ -1,0 +1,75 @@
+import type { Sequelize } from 'sequelize';
+import { Alloy } from './alloy.ts';
+import { AlloyRevision } from './alloy-revision.ts';
+import { Casting } from './casting.ts';
+import { CastingMove } from './casting-move.ts';
+import { Flask } from './flask.ts';
+import { MeltAmendment } from './melt-amendment.ts';
+import { MeltEvent } from './melt-event.ts';
+import { Melt } from './melt.ts';
+import { Reading } from './reading.ts';
+import { StudioSettings } from './studio-settings.ts';
+import { TerminalEnrolment } from './terminal-enrolment.ts';
+import { Terminal } from './terminal.ts';
+import { Tree } from './tree.ts';
+import { User } from './user.ts';
+import { WorkInstructionRevision } from './work-instruction-revision.ts';
+
+const associate = (): void => {
+  Alloy.hasMany(AlloyRevision, { as: 'revisions', foreignKey: 'alloyId' });
+  AlloyRevision.belongsTo(Alloy, { as: 'alloy', foreignKey: 'alloyId' });
+  AlloyRevision.belongsTo(User, { as: 'drafter', foreignKey: 'draftedBy' });
+  AlloyRevision.belongsTo(User, { as: 'checker', foreignKey: 'checkedBy' });
+  AlloyRevision.belongsTo(User, { as: 'approver', foreignKey: 'approvedBy' });
+
+  Flask.hasMany(Casting, { as: 'castings', foreignKey: 'flaskId' });
+  Casting.belongsTo(Flask, { as: 'flask', foreignKey: 'flaskId' });
+  Casting.belongsTo(Tree, { as: 'tree', foreignKey: 'treeId' });
+  Casting.belongsTo(AlloyRevision, { as: 'alloyRevision', foreignKey: 'alloyRevisionId' });
+  Casting.belongsTo(User, { as: 'planner', foreignKey: 'plannedBy' });
+  Casting.belongsTo(User, { as: 'caster', foreignKey: 'casterId' });
+  Casting.belongsTo(Melt, { as: 'melt', foreignKey: 'meltId' });
+
+  Melt.belongsTo(Casting, { as: 'casting', foreignKey: 'castingId', constraints: false });
+  Melt.hasMany(MeltEvent, { as: 'events', foreignKey: 'meltId' });
+  Melt.hasMany(MeltAmendment, { as: 'amendments', foreignKey: 'meltId' });
+  Melt.belongsTo(AlloyRevision, { as: 'alloyRevision', foreignKey: 'alloyRevisionId' });
+  Melt.belongsTo(WorkInstructionRevision, {
+    as: 'workInstructionRevision',
+    foreignKey: 'workInstructionRevisionId',
+  });
+  Melt.belongsTo(User, { as: 'opener', foreignKey: 'openedBy' });
+  Melt.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
+
+  MeltEvent.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  MeltEvent.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
+  MeltAmendment.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+};
+
+const classes = {
+  Alloy,
+  AlloyRevision,
+  Casting,
+  CastingMove,
+  Flask,
+  Melt,
+  MeltAmendment,
+  MeltEvent,
+  Reading,
+  StudioSettings,
+  Terminal,
+  TerminalEnrolment,
+  Tree,
+  User,
+  WorkInstructionRevision,
+};
+
+/** Every model of the product, by name. */
+export type Models = typeof classes;
+
+/** Binds every model and association to a database. */
+export const initModels = (sequelize: Sequelize): Models => {
+  for (const model of Object.values(classes)) model.define(sequelize);
+  associate();
+  return classes;
+};

@@ -1,0 +1,18 @@
+import { furnaceRoles } from '#shared/domain/people/role.ts';
+import type { Melt } from '../models/melt.ts';
+import { isAny, isAtTerminal, isSignedIn, type Actor } from './actor.ts';
+import type { Policy } from './policy.ts';
+
+/** Who may write in the melt book, and read it. */
+export const meltPolicy = {
+  list: { who: isSignedIn },
+  read: { who: isSignedIn },
+  /** Only the terminal that holds the card writes to it. */
+  record: {
+    who: (actor: Actor) => isAtTerminal(actor) && isAny(actor, ...furnaceRoles),
+    when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
+  },
+  /** An apprentice ends no card and stands by no doubtful reading. */
+  decide: { who: (actor: Actor) => isAtTerminal(actor) && isAny(actor, 'owner', 'caster') },
+  amend: { who: (actor: Actor) => actor.via === 'desk' && isAny(actor, 'owner', 'caster') },
+} satisfies Record<string, Policy<Melt>>;

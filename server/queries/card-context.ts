@@ -1,0 +1,25 @@
+import { computeCardFigures } from '#shared/domain/pour-card/card-figures.ts';
+import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import type { StudioSettings } from '../models/studio-settings.ts';
+import type { LoadedCasting } from './load-casting.ts';
+
+/** What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables. */
+export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): CardContext => {
+  const { alloyRevision, tree, flask, method } = casting;
+  return {
+    figures: computeCardFigures({
+      alloyName: `${alloyRevision.alloy.name}, revision ${alloyRevision.number}`,
+      family: alloyRevision.alloy.family,
+      alloy: alloyRevision.figures,
+      quench: alloyRevision.quench,
+      method,
+      sectionMm: tree.thinnestSectionMm,
+      waxMassG: tree.waxMassG,
+      flaskDiameterMm: flask.diameterMm,
+      tables: studio.processTables,
+    }),
+    limits: studio.limits,
+    plannedMetalG: casting.plannedMetalG,
+    units: { temperature: studio.temperatureUnit, mass: studio.massUnit },
+  };
+};

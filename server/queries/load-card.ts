@@ -1,0 +1,29 @@
+import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import type { WorkInstructionRevision } from '../models/work-instruction-revision.ts';
+import type { Services } from '../services/services.ts';
+import { cardContextOf } from './card-context.ts';
+import type { LoadedCasting } from './load-casting.ts';
+import { loadInstruction } from './load-instruction.ts';
+import { loadMelt, type ListedMelt, type LoadedEvent } from './load-melt.ts';
+import { loadStudio } from './load-studio.ts';
+
+/** A pour card with everything a terminal shows. */
+export interface LoadedCard {
+  readonly casting: LoadedCasting;
+  readonly context: CardContext;
+  readonly instruction: WorkInstructionRevision;
+  readonly melt: ListedMelt | null;
+  readonly events: readonly LoadedEvent[];
+}
+
+/** Loads a casting's card: a running one keeps the context and instruction it began with, a new one has today's. */
+export const loadCard = async (services: Services, casting: LoadedCasting): Promise<LoadedCard> => {
+  const running = casting.melt !== null && (casting.melt.overAt === null || casting.state !== 'holding');
+  if (casting.melt && running) {
+    const melt = await loadMelt(services, casting.melt.id);
+    const { context, workInstructionRevision, events } = melt;
+    return { casting, context, instruction: workInstructionRevision, melt, events };
+  }
+  const [studio, instruction] = await Promise.all([loadStudio(services), loadInstruction(services)]);
+  return { casting, context: cardContextOf(casting, studio), instruction, melt: null, events: [] };
+};

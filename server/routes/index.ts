@@ -1,0 +1,25 @@
+import { alloyRoutes } from './alloys.ts';
+import { cardRoutes } from './cards.ts';
+import { castingRoutes } from './castings.ts';
+import type { Route } from './define-route.ts';
+import { flaskRoutes } from './flasks.ts';
+import { healthRoutes } from './health.ts';
+import { meltRoutes } from './melts.ts';
+import { peopleRoutes } from './people.ts';
+import { sessionRoutes } from './sessions.ts';
+import { studioRoutes } from './studio.ts';
+import { terminalRoutes } from './terminals.ts';
+
+/** Every route of the server; a test walks them as every role. */
+export const routes: readonly Route[] = [
+  ...healthRoutes,
+  ...sessionRoutes,
+  ...terminalRoutes,
+  ...peopleRoutes,
+  ...studioRoutes,
+  ...alloyRoutes,
+  ...flaskRoutes,
+  ...castingRoutes,
+  ...cardRoutes,
+  ...meltRoutes,
+];

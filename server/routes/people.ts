@@ -1,0 +1,53 @@
+import { createPersonRequest, updatePersonRequest } from '#shared/contracts/person.ts';
+import { idParams } from '#shared/contracts/common.ts';
+import { createPerson } from '../commands/create-person.ts';
+import { unlockPerson } from '../commands/unlock-person.ts';
+import { updatePerson } from '../commands/update-person.ts';
+import { personPolicy } from '../policies/person.ts';
+import { presentPerson, presentPersonAtTerminal } from '../presenters/person.ts';
+import { listPeople, listPeopleAtTerminal, loadPerson } from '../queries/load-person.ts';
+import { defineRoute } from './define-route.ts';
+
+const list = defineRoute({
+  method: 'get',
+  path: '/api/people',
+  policy: personPolicy.list,
+  act: async ({ actor, services }) => (await listPeople(services)).map((user) => presentPerson(user, actor)),
+});
+
+const listAtTerminal = defineRoute({
+  method: 'get',
+  path: '/api/terminal/people',
+  policy: personPolicy.listAtTerminal,
+  act: async ({ services }) => (await listPeopleAtTerminal(services)).map(presentPersonAtTerminal),
+});
+
+const create = defineRoute({
+  method: 'post',
+  path: '/api/people',
+  policy: personPolicy.create,
+  body: createPersonRequest,
+  status: 201,
+  act: async ({ actor, services, body }) => presentPerson(await createPerson(services, body), actor),
+});
+
+const update = defineRoute({
+  method: 'patch',
+  path: '/api/people/:id',
+  policy: personPolicy.update,
+  params: idParams,
+  body: updatePersonRequest,
+  act: async ({ actor, services, params, body }) =>
+    presentPerson(await updatePerson(services, params.id, body), actor),
+});
+
+const unlock = defineRoute({
+  method: 'post',
+  path: '/api/people/:id/unlock',
+  policy: personPolicy.unlock,
+  params: idParams,
+  act: async ({ actor, services, params }) =>
+    presentPerson(await unlockPerson(services, await loadPerson(services, params.id)), actor),
+});
+
+export const peopleRoutes = [list, listAtTerminal, create, update, unlock];

@@ -1,0 +1,1 @@
+export function withFileLock<T>(path: string, task: () => Promise<T>, onWait?: () => void): Promise<T>;

@@ -1,0 +1,2 @@
+export function processIdentity(pid?: number): string;
+export function isProcessAlive(identity: string): boolean;

@@ -1,0 +1,14 @@
+import type { Sequelize } from 'sequelize';
+import type { Models } from '../models/index.ts';
+import type { Logger } from './logger.ts';
+import type { Secrets } from './secrets.ts';
+
+/** What commands and queries work with. */
+export interface Services {
+  readonly sequelize: Sequelize;
+  readonly models: Models;
+  readonly secrets: Secrets;
+  readonly logger: Logger;
+  /** The server's clock; tests set it. */
+  readonly now: () => Date;
+}

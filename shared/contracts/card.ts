@@ -1,0 +1,77 @@
+import { z } from 'zod';
+import { castLooks, chargeKinds, stopReasons, type CardEvent } from '#shared/domain/pour-card/card-event.ts';
+import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import type { WorkInstruction } from '#shared/domain/pour-card/work-instruction.ts';
+import type { Casting } from './casting.ts';
+import { instant, massG, massOrNoneG, optionalWords, temperatureC, words, type Abilities } from './common.ts';
+
+/** What may be sent from a terminal to the melt book. */
+export const cardEvent = z.discriminatedUnion('type', [
+  z.object({ type: z.literal('guard-confirmed'), prompts: z.array(z.string().max(60)).max(30) }),
+  z.object({ type: z.literal('charge-weighed'), kind: z.enum(chargeKinds), massG }),
+  z.object({ type: z.literal('charge-taken-out'), kind: z.enum(chargeKinds), massG }),
+  z.object({ type: z.literal('charge-closed') }),
+  z.object({ type: z.literal('reading-taken'), temperatureC, confirmed: z.boolean().default(false) }),
+  z.object({ type: z.literal('melt-ready') }),
+  z.object({ type: z.literal('flask-out'), furnaceC: temperatureC.nullable() }),
+  z.object({ type: z.literal('poured') }),
+  z.object({ type: z.literal('quenched') }),
+  z.object({
+    type: z.literal('closed'),
+    buttonMassG: massOrNoneG,
+    lossMassG: massOrNoneG,
+    look: z.enum(castLooks),
+    note: optionalWords(2000),
+  }),
+  z.object({ type: z.literal('stopped'), reason: z.enum(stopReasons) }),
+  z.object({ type: z.literal('resumed') }),
+  z.object({ type: z.literal('abandoned'), note: words(500, 'Say why the card ends here.') }),
+]) satisfies z.ZodType<CardEvent>;
+
+/** Records one event; `key` is made by the terminal once, so that sending it again records nothing new. */
+export const recordEventRequest = z.object({ key: z.uuid(), occurredAt: instant, event: cardEvent });
+/** Records one event. */
+export type RecordEventRequest = z.input<typeof recordEventRequest>;
+
+/** Looks up what a scanned or typed code means; the code is judged by the flask code's own rules. */
+export const findCardQuery = z.object({ code: z.string().max(500, 'That is far longer than a flask code.') });
+
+/** Opens a casting's card at this terminal; `carryOn` takes over one's own card from another terminal. */
+export const openCardRequest = z.object({
+  key: z.uuid(),
+  occurredAt: instant,
+  carryOn: z.boolean().default(false),
+});
+/** Opens a casting's card. */
+export type OpenCardRequest = z.input<typeof openCardRequest>;
+
+/** One event of the melt book. */
+export interface MeltEvent {
+  readonly seq: number;
+  readonly key: string;
+  readonly event: CardEvent;
+  readonly person: string;
+  readonly terminal: string;
+  readonly occurredAt: string;
+  readonly recordedAt: string;
+}
+
+/** Everything a terminal shows for one flask. */
+export interface PourCard {
+  readonly casting: Casting;
+  /** The alloy revision's composition in wt%, for the melt beam. */
+  readonly compositionWt: Readonly<Record<string, number>>;
+  readonly rangeBasis: 'computed' | 'measured';
+  readonly context: CardContext;
+  readonly instruction: WorkInstruction & { readonly revision: number };
+  /** The melt this card is writing to, or null until it is opened. */
+  readonly melt: {
+    readonly id: string;
+    readonly code: string;
+    readonly openedBy: string;
+    readonly terminal: string;
+  } | null;
+  readonly events: readonly MeltEvent[];
+  readonly abilities: Abilities<'open' | 'record'>;
+  readonly serverTime: string;
+}

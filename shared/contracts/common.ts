@@ -1,0 +1,36 @@
+import { z } from 'zod';
+
+/** Path parameter naming one record. */
+export const idParams = z.object({ id: z.uuid('That is not a record of ours.') });
+
+/** A short line of words: trimmed, never empty, at most `max` characters. */
+export const words = (max: number, empty: string) =>
+  z.string({ error: empty }).trim().min(1, empty).max(max, `Keep it under ${max} characters.`);
+
+/** Words that may be left out; trimmed, at most `max` characters. */
+export const optionalWords = (max: number) =>
+  z.string().trim().max(max, `Keep it under ${max} characters.`).default('');
+
+/** A mass in grams that a studio could weigh: above zero, at most 100 kg. */
+export const massG = z
+  .number({ error: 'Type a mass in numbers.' })
+  .positive('A mass must be above zero.')
+  .max(100_000, 'That is more than a studio could melt: check the unit.');
+
+/** A mass in grams that may be nothing. */
+export const massOrNoneG = z
+  .number({ error: 'Type a mass in numbers.' })
+  .nonnegative('A mass cannot be below zero.')
+  .max(100_000, 'That is more than a studio could melt: check the unit.');
+
+/** A temperature in °C within what a workshop can meet. */
+export const temperatureC = z
+  .number({ error: 'Type a temperature in numbers.' })
+  .min(-10, 'That is colder than any workshop.')
+  .max(2000, 'That is hotter than any furnace here.');
+
+/** An ISO 8601 instant with its offset. */
+export const instant = z.iso.datetime({ offset: true, error: 'That is not a moment in time.' });
+
+/** What the signed-in person may do with a record, sent beside it. */
+export type Abilities<Key extends string> = Readonly<Record<Key, boolean>>;

@@ -1,0 +1,52 @@
+import { z } from 'zod';
+import { roles, type Role } from '#shared/domain/people/role.ts';
+import { words, type Abilities } from './common.ts';
+import { pin } from './session.ts';
+
+const name = words(80, 'Type the person’s name.');
+const login = words(60, 'Type a sign-in name.').regex(
+  /^[\p{L}\p{N}._-]+$/u,
+  'Use letters, digits, dot, dash or underscore.',
+);
+const password = z
+  .string({ error: 'Type a password.' })
+  .min(12, 'Use twelve characters or more; a short sentence works well.')
+  .max(200, 'Keep it under 200 characters.');
+const roleList = z
+  .array(z.enum(roles), { error: 'Choose at least one role.' })
+  .min(1, 'Choose at least one role.')
+  .max(roles.length)
+  .refine((list) => new Set(list).size === list.length, 'Each role counts once.');
+
+/** Adds a person. */
+export const createPersonRequest = z.object({ name, login, roles: roleList, password, pin: pin.nullable() });
+/** Adds a person. */
+export type CreatePersonRequest = z.infer<typeof createPersonRequest>;
+
+/** Changes a person; what is left out stays. */
+export const updatePersonRequest = z
+  .object({ name, login, roles: roleList, active: z.boolean(), password, pin: pin.nullable() })
+  .partial()
+  .refine((change) => Object.keys(change).length > 0, 'Nothing was changed.');
+/** Changes a person; what is left out stays. */
+export type UpdatePersonRequest = z.infer<typeof updatePersonRequest>;
+
+/** A person as the owner sees them. */
+export interface Person {
+  readonly id: string;
+  readonly name: string;
+  readonly login: string;
+  readonly roles: readonly Role[];
+  readonly active: boolean;
+  readonly hasPin: boolean;
+  /** Whether wrong PINs have locked the terminal sign-in until the owner opens it again. */
+  readonly pinLocked: boolean;
+  readonly abilities: Abilities<'update' | 'unlock'>;
+}
+
+/** A person as the terminal's sign-in shows them. */
+export interface PersonAtTerminal {
+  readonly id: string;
+  readonly name: string;
+  readonly roles: readonly Role[];
+}

@@ -1,0 +1,94 @@
+import type { Celsius, Grams, Units } from '#shared/lib/units.ts';
+import type { StudioLimits } from '../studio/studio-limits.ts';
+import type { CardEvent, CastLook, ChargeKind, StopReason } from './card-event.ts';
+import type { CardFigures } from './card-figures.ts';
+import type { CardStep } from './card-step.ts';
+
+/** What a running card is judged against; fixed when the card is opened. */
+export interface CardContext {
+  readonly figures: CardFigures;
+  readonly limits: StudioLimits;
+  readonly plannedMetalG: Grams;
+  /** The units in which sentences are written. */
+  readonly units: Units;
+}
+
+/** A melt temperature with the moment it was read. */
+export interface Reading {
+  readonly temperatureC: Celsius;
+  readonly at: string;
+}
+
+/** Something that went otherwise than the card says; marks the melt in the book. */
+export interface Departure {
+  readonly kind:
+    | 'reading-confirmed'
+    | 'flask-off-temperature'
+    | 'melt-off-window'
+    | 'poured-late'
+    | 'quenched-early'
+    | 'quenched-late'
+    | 'loss-over-limit'
+    | 'cast-fault'
+    | 'work-stopped';
+  readonly sentence: string;
+  readonly at: string;
+}
+
+/** The pour as it happened: time, last melt reading, mould temperature expected by the cooling law. */
+export interface Pour {
+  readonly at: string;
+  readonly meltC: Celsius | null;
+  readonly flaskC: Celsius;
+  readonly secondsOut: number;
+}
+
+/** Metal out at the end of the card. */
+export interface Closing {
+  readonly at: string;
+  readonly buttonMassG: Grams;
+  readonly lossMassG: Grams;
+  /** Metal in less button and loss. */
+  readonly castMassG: Grams;
+  readonly look: CastLook;
+  readonly note: string;
+}
+
+/** Where a pour card stands: the fold of its events. */
+export interface CardState {
+  readonly step: CardStep | 'done' | 'abandoned';
+  readonly stopped: StopReason | null;
+  readonly charge: Readonly<Record<ChargeKind, Grams>>;
+  readonly readings: readonly Reading[];
+  readonly flaskOut: { readonly at: string; readonly startC: Celsius } | null;
+  readonly pour: Pour | null;
+  readonly quenchedAt: string | null;
+  readonly closing: Closing | null;
+  readonly departures: readonly Departure[];
+  readonly lastEvent: CardEvent['type'] | null;
+}
+
+/** A card before anything has happened on it. */
+export const freshCard: CardState = {
+  step: 'guard',
+  stopped: null,
+  charge: { grain: 0, returns: 0 },
+  readings: [],
+  flaskOut: null,
+  pour: null,
+  quenchedAt: null,
+  closing: null,
+  departures: [],
+  lastEvent: null,
+};
+
+/** Metal in the crucible, g; rounded to the milligram so that sums of weighings compare exactly. */
+export const chargedG = ({ charge }: Pick<CardState, 'charge'>): Grams =>
+  Math.round((charge.grain + charge.returns) * 1000) / 1000;
+
+/** The last melt reading, or null before the first. */
+export const lastReading = ({ readings }: Pick<CardState, 'readings'>): Reading | null =>
+  readings.at(-1) ?? null;
+
+/** Whether nothing more can happen on the card. */
+export const isOver = ({ step }: Pick<CardState, 'step'>): boolean => step === 'done' || step === 'abandoned';
