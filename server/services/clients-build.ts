@@ -49,15 +49,20 @@ const build = (root: string, signal: AbortSignal | undefined): Promise<void> =>
       cwd: root,
       // Whatever starts us, the screens are built for use: tests run with another NODE_ENV.
       env: { ...process.env, NODE_ENV: 'production' },
-      stdio: ['ignore', 'inherit', 'inherit'],
+      stdio: ['ignore', 'pipe', 'pipe'],
       ...(signal && { signal }),
     });
+    const words: Buffer[] = [];
+    child.stdout.on('data', (chunk: Buffer) => words.push(chunk));
+    child.stderr.on('data', (chunk: Buffer) => words.push(chunk));
     child.once('error', reject);
-    child.once('exit', (code) =>
-      code === 0
-        ? resolve()
-        : reject(new StartProblem('The screens could not be built; the reason is above.')),
-    );
+    child.once('close', (code) => {
+      if (code === 0) resolve();
+      else
+        reject(
+          new StartProblem(`The screens could not be built:\n${Buffer.concat(words).toString().trim()}`),
+        );
+    });
   });
 
 /** Builds the desk and the terminal when their sources have changed since, and gives the folder they are in. */

@@ -1,4 +1,4 @@
-import { randomBytes } from 'node:crypto';
+import { randomBytes, randomUUID } from 'node:crypto';
 import { link, readFile, unlink, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import type { Environment } from '#server/environment.ts';
@@ -27,14 +27,19 @@ const readSecret = async (path: string): Promise<string | null> => {
     );
   }
   throw new StartProblem(
-    `${path} is damaged; put it back from a backup (without it, ${path.endsWith('pin-pepper') ? 'every PIN must be set anew' : 'everyone must sign in again'}), or remove it to have a new one made.`,
+    `${path} is damaged. Put it back from a backup, or remove it to have a new one made; then everyone signs in again, and PINs that were made with it must be set anew.`,
   );
 };
 
 /** Writes beside and links into place, so that a crash leaves no half file and the first of two starters wins. */
 const makeSecret = async (path: string): Promise<string> => {
-  const aside = `${path}.${process.pid}`;
-  await writeFile(aside, `${randomBytes(SECRET_BYTES).toString('base64url')}\n`, { mode: 0o600 });
+  const aside = `${path}.${randomUUID()}`;
+  const text = `${randomBytes(SECRET_BYTES).toString('base64url')}\n`;
+  await writeFile(aside, text, { mode: 0o600 }).catch((error: unknown) => {
+    throw new StartProblem(
+      `${path} cannot be written (${codeOf(error)}); set DATA_DIR to a folder you may write to.`,
+    );
+  });
   try {
     await link(aside, path);
   } catch (error) {

@@ -1,0 +1,1 @@
+export function ensurePackages(root: string, say: (line: string) => void): Promise<void>;
