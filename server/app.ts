@@ -14,6 +14,7 @@ import { healthRoutes } from './routes/health.ts';
 import { routes } from './routes/index.ts';
 import { mountRoute } from './routes/mount-route.ts';
 import type { Logger } from './services/logger.ts';
+import { createMailer } from './services/mailer.ts';
 import type { Secrets } from './services/secrets.ts';
 import type { Services } from './services/services.ts';
 
@@ -39,8 +40,15 @@ export interface App {
 
 /** Builds the application: the API under `/api`, the desk at `/`, the terminal at `/kiosk`. */
 export const createApp = (deps: AppDeps): App => {
-  const { sequelize, databaseUrl, secrets, logger, clientsDir, now = () => new Date() } = deps;
-  const services: Services = { sequelize, models: initModels(sequelize), secrets, logger, now };
+  const { sequelize, databaseUrl, environment, secrets, logger, clientsDir, now = () => new Date() } = deps;
+  const services: Services = {
+    sequelize,
+    models: initModels(sequelize),
+    secrets,
+    mailer: createMailer(environment.smtpUrl, logger),
+    logger,
+    now,
+  };
   const sessions = createSessions(databaseUrl, secrets.sessionSecret);
   const passport = createPassport(services);
   const app = express();

@@ -4,6 +4,7 @@ import type { User } from '../models/user.ts';
 import { pepperedPin, verifySecret } from '../services/hashing.ts';
 import type { Services } from '../services/services.ts';
 import { tooSoon, waitAfter } from './sign-in-guard.ts';
+import { tellOwners } from './tell-owners.ts';
 
 /** Wrong PINs in a row after which only the owner opens the sign-in again. */
 const lockAfter = 10;
@@ -26,14 +27,21 @@ const countFailure = async (user: User, now: Date): Promise<AppError> => {
   return new AppError('wrong-sign-in', 'That PIN is not right. Try again.');
 };
 
+const tellOfLock = ({ name }: User): { readonly subject: string; readonly text: string } => ({
+  subject: `Terminal sign-in of ${name} is locked`,
+  text: `${lockAfter} wrong PINs in a row were typed for ${name}. If that was not ${name}, ask who stood at the terminal. You can open the sign-in again at the desk, under People.`,
+});
+
 /**
  * Signs a person in at a terminal. The row is locked while the PIN is checked, so that tries at several terminals
  * cannot slip past the count; the failure is committed before it is reported.
  */
 export const signInWithPin = async (
-  { sequelize, models, secrets, now }: Services,
+  services: Services,
   { personId, pin }: { readonly personId: string; readonly pin: string },
 ): Promise<User> => {
+  const { sequelize, models, secrets, now } = services;
+  let lockedNow: User | null = null;
   const outcome = await sequelize.transaction(async (): Promise<User | AppError> => {
     const user = await models.User.findByPk(personId, { lock: true });
     if (!user?.active || user.pinHash === null || !user.roles.some((role) => furnaceRoles.includes(role))) {
@@ -42,10 +50,14 @@ export const signInWithPin = async (
     if (user.pinLockedAt) return locked();
     const early = tooSoon(user.pinWaitUntil, now());
     if (early) return early;
-    if (!(await verifySecret(pepperedPin(pin, secrets.pinPepper), user.pinHash)))
-      return countFailure(user, now());
+    if (!(await verifySecret(pepperedPin(pin, secrets.pinPepper), user.pinHash))) {
+      const failure = await countFailure(user, now());
+      if (user.pinLockedAt) lockedNow = user;
+      return failure;
+    }
     return user.update({ pinFailures: 0, pinWaitUntil: null });
   });
+  if (lockedNow) await tellOwners(services, tellOfLock(lockedNow));
   if (outcome instanceof AppError) throw outcome;
   return outcome;
 };

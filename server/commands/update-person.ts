@@ -1,17 +1,16 @@
 import { Op } from 'sequelize';
-import type { UpdatePersonRequest } from '#shared/contracts/person.ts';
+import type { z } from 'zod';
+import type { updatePersonRequest } from '#shared/contracts/person.ts';
 import { AppError, notFound } from '../errors.ts';
 import type { User } from '../models/user.ts';
 import { hashSecret, pepperedPin } from '../services/hashing.ts';
 import type { Services } from '../services/services.ts';
 import { refuseTakenLogin } from './refuse-taken-login.ts';
 
+type UpdatePerson = z.output<typeof updatePersonRequest>;
+
 /** Refuses to take the last owner away, which would lock everyone out of the studio. */
-const refuseLastOwner = async (
-  { models }: Services,
-  user: User,
-  change: UpdatePersonRequest,
-): Promise<void> => {
+const refuseLastOwner = async ({ models }: Services, user: User, change: UpdatePerson): Promise<void> => {
   const staysOwner = (change.roles ?? user.roles).includes('owner') && (change.active ?? user.active);
   if (staysOwner || !user.roles.includes('owner')) return;
   // All owners are locked in one order, so that two owners cannot remove each other at the same moment.
@@ -25,11 +24,7 @@ const refuseLastOwner = async (
 };
 
 /** Changes a person; what the request leaves out stays. */
-export const updatePerson = async (
-  services: Services,
-  id: string,
-  request: UpdatePersonRequest,
-): Promise<User> => {
+export const updatePerson = async (services: Services, id: string, request: UpdatePerson): Promise<User> => {
   const { models, secrets, sequelize } = services;
   const { password, pin, ...plain } = request;
   const passwordHash = password === undefined ? undefined : await hashSecret(password);

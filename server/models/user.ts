@@ -13,6 +13,8 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
   declare id: CreationOptional<string>;
   declare name: string;
   declare login: string;
+  /** Where notices go; null for none. */
+  declare email: CreationOptional<string | null>;
   declare roles: Role[];
   declare active: CreationOptional<boolean>;
   declare passwordHash: string;
@@ -32,6 +34,7 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
         id: { type: DataTypes.UUID, primaryKey: true, defaultValue: DataTypes.UUIDV4 },
         name: { type: DataTypes.TEXT, allowNull: false },
         login: { type: DataTypes.TEXT, allowNull: false },
+        email: { type: DataTypes.TEXT },
         roles: { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false },
         active: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: true },
         passwordHash: { type: DataTypes.TEXT, allowNull: false },

@@ -9,6 +9,7 @@ export const presentPerson = (user: User, actor: Actor): Person => ({
   id: user.id,
   name: user.name,
   login: user.login,
+  email: user.email ?? null,
   roles: user.roles,
   active: user.active,
   hasPin: user.pinHash !== null,

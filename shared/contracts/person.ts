@@ -12,6 +12,13 @@ const password = z
   .string({ error: 'Type a password.' })
   .min(12, 'Use twelve characters or more; a short sentence works well.')
   .max(200, 'Keep it under 200 characters.');
+const email = z
+  .union([
+    z.literal('').transform(() => null),
+    z.null(),
+    z.email('That is not an e-mail address.').max(200, 'Keep it under 200 characters.'),
+  ])
+  .default(null);
 const roleList = z
   .array(z.enum(roles), { error: 'Choose at least one role.' })
   .min(1, 'Choose at least one role.')
@@ -19,23 +26,40 @@ const roleList = z
   .refine((list) => new Set(list).size === list.length, 'Each role counts once.');
 
 /** Adds a person. */
-export const createPersonRequest = z.object({ name, login, roles: roleList, password, pin: pin.nullable() });
+export const createPersonRequest = z.object({
+  name,
+  login,
+  email,
+  roles: roleList,
+  password,
+  pin: pin.nullable(),
+});
 /** Adds a person. */
-export type CreatePersonRequest = z.infer<typeof createPersonRequest>;
+export type CreatePersonRequest = z.input<typeof createPersonRequest>;
 
 /** Changes a person; what is left out stays. */
 export const updatePersonRequest = z
-  .object({ name, login, roles: roleList, active: z.boolean(), password, pin: pin.nullable() })
+  .object({
+    name,
+    login,
+    email: email.unwrap(),
+    roles: roleList,
+    active: z.boolean(),
+    password,
+    pin: pin.nullable(),
+  })
   .partial()
   .refine((change) => Object.keys(change).length > 0, 'Nothing was changed.');
 /** Changes a person; what is left out stays. */
-export type UpdatePersonRequest = z.infer<typeof updatePersonRequest>;
+export type UpdatePersonRequest = z.input<typeof updatePersonRequest>;
 
 /** A person as the owner sees them. */
 export interface Person {
   readonly id: string;
   readonly name: string;
   readonly login: string;
+  /** Where notices go; null for none. */
+  readonly email: string | null;
   readonly roles: readonly Role[];
   readonly active: boolean;
   readonly hasPin: boolean;

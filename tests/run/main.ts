@@ -1,7 +1,7 @@
-import { mkdtempSync, rmSync } from 'node:fs';
-import { availableParallelism, tmpdir } from 'node:os';
+import { availableParallelism } from 'node:os';
 import { join } from 'node:path';
 import { sayOnStdout as say } from '#server/services/say.ts';
+import { makeScratchFolder } from '#tests/support/scratch-folder.ts';
 import { type Choice, PROJECTS, readChoice } from './choice.ts';
 import { endChildOnSignal, runNode } from './child.ts';
 import { ensurePrerequisites } from './prerequisites.ts';
@@ -20,6 +20,12 @@ const COMMANDS: Readonly<Record<string, readonly string[]>> = {
   format: ['node_modules/prettier/bin/prettier.cjs', '--check', '--log-level=warn', '.'],
 };
 
+/** Goes with everything in it when this process does, even when it is killed. */
+const scratch = makeScratchFolder();
+
+/** What runs under test keeps its hands off the real data, and is known to the sweeper by this setting. */
+const settings = { DATA_DIR: join(scratch.path, 'data') };
+
 const timed = async <T>(work: () => Promise<T>): Promise<[T, number]> => {
   const from = performance.now();
   return [await work(), (performance.now() - from) / 1000];
@@ -36,8 +42,7 @@ const workers = (): number => Math.max(2, Math.min(4, availableParallelism()));
 
 const runVitest = async ({ projects, paths }: Choice): Promise<[Step, VitestReport]> => {
   say('\n== tests');
-  const folder = mkdtempSync(join(tmpdir(), 'ladlemark-report-'));
-  const output = join(folder, 'report.json');
+  const output = join(scratch.path, 'report.json');
   const args = ['run', `--maxWorkers=${workers()}`, '--reporter=default', '--reporter=json'];
   const chosen = projects.map((project) => `--project=${project}`);
   const command = [
@@ -47,9 +52,8 @@ const runVitest = async ({ projects, paths }: Choice): Promise<[Step, VitestRepo
     ...chosen,
     ...paths,
   ];
-  const [code, seconds] = await timed(() => runNode(command));
+  const [code, seconds] = await timed(() => runNode(command, settings));
   const report = readVitestReport(output, code);
-  rmSync(folder, { recursive: true, force: true });
   return [{ name: 'tests', seconds, passed: report.passed, failed: report.failed }, report];
 };
 
@@ -70,7 +74,8 @@ const sum = (steps: readonly Step[], part: 'passed' | 'failed'): number =>
   steps.reduce((total, step) => total + step[part], 0);
 
 /** The very last line, whatever happened before. */
-const finish = (passed: number, failed: number): never => {
+const finish = async (passed: number, failed: number): Promise<never> => {
+  await scratch.sweep();
   say(`\n${passed} passed, ${failed} failed`);
   process.exit(failed > 0 || passed === 0 ? 1 : 0);
 };
@@ -92,7 +97,9 @@ const runChecks = async (args: readonly string[]): Promise<never> => {
 
 const runScript = async (path: string, args: readonly string[]): Promise<never> => {
   await ensurePrerequisites(PROJECTS);
-  return process.exit(await runNode(['--import', 'tsx', path, ...args]));
+  const code = await runNode(['--import', 'tsx', path, ...args], settings);
+  await scratch.sweep();
+  return process.exit(code);
 };
 
 const [first = '', ...rest] = process.argv.slice(2);
@@ -105,5 +112,5 @@ try {
   else await runChecks(process.argv.slice(2));
 } catch (error) {
   say(error instanceof Error ? error.message : String(error));
-  finish(0, 1);
+  await finish(0, 1);
 }

@@ -10,6 +10,8 @@ const SCRIPT = fileURLToPath(new URL('./sweep.mjs', import.meta.url));
 export const startSweeper = (folders: readonly string[]): (() => Promise<void>) => {
   const child = spawn(process.execPath, [SCRIPT, ...folders], {
     detached: true,
+    // Without our settings: a sweeper for a folder above must not take this one for a server in it.
+    env: {},
     stdio: ['pipe', 'ignore', 'inherit'],
   });
   const done = new Promise<void>((resolve) => child.once('exit', () => resolve()));

@@ -1,7 +1,12 @@
 import { liquidusK, solidusK, solvusK } from '#shared/metallurgy/boundaries.ts';
 import { Engine, type Job } from '#shared/metallurgy/engine.ts';
 import { LOWEST_C } from '#shared/metallurgy/limits.ts';
-import { MODEL_ELEMENTS, ZERO_CELSIUS_K, type Interaction, type ModelParameters } from '#shared/metallurgy/model.ts';
+import {
+  MODEL_ELEMENTS,
+  ZERO_CELSIUS_K,
+  type Interaction,
+  type ModelParameters,
+} from '#shared/metallurgy/model.ts';
 import type { AssessmentPoint, Quantity } from './points.ts';
 
 /** Liquidus, solidus and (where asked for) solvus of a point, °C. */
@@ -10,7 +15,10 @@ export type Computed = Readonly<Record<Quantity, number>>;
 /** The model with some interactions replaced. */
 export const withInteractions = (base: ModelParameters, made: readonly Interaction[]): ModelParameters => {
   const names = new Set(made.map((i) => i.elements.join('-')));
-  return { ...base, interactions: [...base.interactions.filter((i) => !names.has(i.elements.join('-'))), ...made] };
+  return {
+    ...base,
+    interactions: [...base.interactions.filter((i) => !names.has(i.elements.join('-'))), ...made],
+  };
 };
 
 // Fillers and tie-line ends lie past the limit that the public functions refuse, so the job is made here.
@@ -23,7 +31,10 @@ const jobOf = (engine: Engine, point: AssessmentPoint): Job => {
 };
 
 /** Computes every point with one set of parameters. */
-export const computePoints = (model: ModelParameters, points: readonly AssessmentPoint[]): readonly Computed[] => {
+export const computePoints = (
+  model: ModelParameters,
+  points: readonly AssessmentPoint[],
+): readonly Computed[] => {
   const engine = new Engine(model);
   return points.map((point) => {
     const job = jobOf(engine, point);

@@ -28,7 +28,10 @@ export interface Fit {
 type Evaluate = (values: readonly number[]) => readonly number[];
 
 /** Every residual of some points under a model, computed less published. */
-export const residualsOf = (model: ModelParameters, points: readonly AssessmentPoint[]): readonly Residual[] => {
+export const residualsOf = (
+  model: ModelParameters,
+  points: readonly AssessmentPoint[],
+): readonly Residual[] => {
   const computed = computePoints(model, points);
   return points.flatMap((point, k) =>
     point.values.map((value) => {
@@ -59,7 +62,11 @@ const remembered = (evaluate: Evaluate): Evaluate => {
 };
 
 /** Standard errors from the curvature of the sum of squares at the answer. */
-const standardErrors = (evaluate: Evaluate, values: readonly number[], chiSquare: number): readonly number[] => {
+const standardErrors = (
+  evaluate: Evaluate,
+  values: readonly number[],
+  chiSquare: number,
+): readonly number[] => {
   const columns = values.map((_, k) => {
     const up = evaluate(values.map((v, j) => (j === k ? v + STEP : v)));
     const down = evaluate(values.map((v, j) => (j === k ? v - STEP : v)));

@@ -36,9 +36,9 @@ const goldSilverCopper: Stage = {
     { key: 'ternarySlope', meaning: 'fcc Ag-Au-Cu, slope with T', unit: 'J/(mol K)', start: 0 },
   ],
   choices:
-    'Liquid Au-Cu is held at L = [-27900 - T, 4730] J/mol (first guess of the literature, from memory): freeing it lowers ' +
-    'the residuals by less than 0.2 °C and trades against fcc L0. The third coefficient of either phase and a ternary ' +
-    'term in the liquid were tried and dropped: they improve the points used and worsen those held back.',
+    'Liquid Au-Cu is held at L = [-27900 - T, 4730] J/mol (first guess of the literature, from memory): freeing its ' +
+    'L0 lowers the residuals by 0.3 °C and only trades against fcc L0. A third coefficient was tried and dropped: it ' +
+    'improves the points used and worsens those held back. A ternary term in the liquid improves neither.',
   build: ([fcc0 = 0, fcc1 = 0, ternary = 0, slope = 0]) => [
     {
       elements: ['Au', 'Cu'],
