@@ -13,13 +13,15 @@ export default defineConfig({
     rolldownOptions: { input: { desk: 'index.html', kiosk: 'kiosk/index.html' } },
   },
   test: {
+    // A busy machine of two cores is no failure.
+    testTimeout: 20_000,
     projects: [
       {
         extends: true,
         test: {
           name: 'unit',
           environment: 'node',
-          include: ['shared/**/*.test.ts', 'server/**/*.test.ts', 'tests/checks/**/*.test.ts'],
+          include: ['shared/**/*.test.ts', 'server/**/*.test.ts', 'tests/{checks,run}/**/*.test.ts'],
         },
       },
       {
@@ -59,7 +61,7 @@ export default defineConfig({
           name: 'faults',
           environment: 'node',
           include: ['tests/faults/**/*.test.ts'],
-          globalSetup: ['tests/support/postgres-setup.ts'],
+          globalSetup: ['tests/support/postgres-setup.ts', 'tests/support/clients-setup.ts'],
           testTimeout: 180_000,
           hookTimeout: 120_000,
           fileParallelism: false,

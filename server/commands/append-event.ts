@@ -1,3 +1,4 @@
+import { type CreationAttributes, UniqueConstraintError } from 'sequelize';
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import { applyEvent } from '#shared/domain/pour-card/apply-event.ts';
 import { isOver } from '#shared/domain/pour-card/card-state.ts';
@@ -9,6 +10,10 @@ import type { AtTerminal } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
 import { occurredBetween } from './occurred-between.ts';
 import { writeCastingState } from './write-casting-state.ts';
+
+/** The error for a delivery whose key already stands for another event. */
+export const keyUsed = (): AppError =>
+  new AppError('event-refused', 'This delivery carries the mark of another event. Scan the flask again.');
 
 /** An event as it comes from a terminal. */
 export interface ReportedEvent {
@@ -46,6 +51,15 @@ const moveCastingAlong = async (
   await writeCastingState(services, casting, move.to, { userId: actor.person.id, reason: move.reason });
 };
 
+const writeOnce = async ({ models }: Services, values: CreationAttributes<MeltEvent>): Promise<MeltEvent> => {
+  try {
+    return await models.MeltEvent.create(values);
+  } catch (error) {
+    if (!(error instanceof UniqueConstraintError)) throw error;
+    throw keyUsed();
+  }
+};
+
 /**
  * Writes one event at the end of a melt, with its reading and the state it leads to; refused when the card's own rules
  * refuse it. Joins the caller's transaction, which holds the melt's lock.
@@ -61,7 +75,7 @@ export const appendEvent = async (
   const occurredAt = occurredBetween(reported, last?.occurredAt ?? null, now());
   const applied = applyEvent(melt.state, { event, occurredAt: occurredAt.toISOString() }, melt.context);
   if (!applied.ok) throw new AppError('event-refused', applied.error);
-  const recorded = await models.MeltEvent.create({
+  const recorded = await writeOnce(services, {
     meltId: melt.id,
     seq: (last?.seq ?? 0) + 1,
     key,

@@ -12,6 +12,8 @@ export const approveRevision = (
   revision: AlloyRevision,
 ): Promise<AlloyRevision> =>
   sequelize.transaction(async () => {
+    // Two revisions of one alloy take turns, so that the later one supersedes the earlier.
+    await models.Alloy.findByPk(revision.alloyId, { lock: true });
     await lockRevision(revision, 'checked');
     const drift = driftOfFigures(revision.compositionWt, revision.figures);
     if (drift.length > 0) {

@@ -7,6 +7,7 @@ import type { Alloy } from '../models/alloy.ts';
 import type { AlloyRevision } from '../models/alloy-revision.ts';
 import type { SignedIn } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
+import { lockRow } from './lock-row.ts';
 
 type RevisionValues = z.output<typeof createRevisionRequest>;
 
@@ -58,7 +59,7 @@ export const createRevision = (
   values: RevisionValues,
 ): Promise<AlloyRevision> =>
   services.sequelize.transaction(async () => {
-    await alloy.reload({ lock: true });
+    await lockRow(alloy);
     const last = await services.models.AlloyRevision.max<number, AlloyRevision>('number', {
       where: { alloyId: alloy.id },
     });

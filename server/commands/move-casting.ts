@@ -5,6 +5,7 @@ import { AppError } from '../errors.ts';
 import type { Casting } from '../models/casting.ts';
 import type { SignedIn } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
+import { lockRow } from './lock-row.ts';
 import { writeCastingState } from './write-casting-state.ts';
 
 /** Moves a casting along its life by hand; what the pour card records itself is refused here. */
@@ -15,7 +16,7 @@ export const moveCasting = (
   { to, reason }: z.output<typeof moveCastingRequest>,
 ): Promise<void> =>
   services.sequelize.transaction(async () => {
-    await casting.reload({ lock: true });
+    await lockRow(casting);
     if (!castingStatesByHand(casting.state).includes(to)) {
       throw new AppError(
         'wrong-state',

@@ -3,14 +3,15 @@ import type { z } from 'zod';
 import type { recordEventRequest } from '#shared/contracts/card.ts';
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import { judgeReading } from '#shared/domain/pour-card/judge-reading.ts';
-import { AppError } from '../errors.ts';
+import { AppError, notFound } from '../errors.ts';
 import type { Melt } from '../models/melt.ts';
 import type { MeltEvent } from '../models/melt-event.ts';
 import type { AtTerminal } from '../policies/actor.ts';
 import { meltPolicy } from '../policies/melt.ts';
 import { can } from '../policies/policy.ts';
 import type { Services } from '../services/services.ts';
-import { appendEvent } from './append-event.ts';
+import { appendEvent, keyUsed } from './append-event.ts';
+import { lockRow } from './lock-row.ts';
 
 type RecordEvent = z.output<typeof recordEventRequest>;
 
@@ -41,10 +42,16 @@ const alreadyRecorded = async (
   const recorded = await models.MeltEvent.findOne({ where: { key } });
   if (!recorded) return null;
   if (recorded.meltId === melt.id && isDeepStrictEqual(recorded.event, event)) return recorded;
-  throw new AppError(
-    'event-refused',
-    'This delivery carries the mark of another event. Scan the flask again.',
-  );
+  throw keyUsed();
+};
+
+/** Locks a melt after its casting, in the order in which cards are opened, so that the two never wait for each other. */
+const lockMelt = async ({ models }: Services, id: string): Promise<Melt> => {
+  const melt = await models.Melt.findByPk(id);
+  if (!melt) throw notFound('melt');
+  await models.Casting.findByPk(melt.castingId, { lock: true });
+  await lockRow(melt);
+  return melt;
 };
 
 /** Records one event of a card, exactly once however often it is delivered. */
@@ -55,16 +62,16 @@ export const recordEvent = (
   request: RecordEvent,
 ): Promise<MeltEvent> =>
   services.sequelize.transaction(async () => {
-    const melt = await services.models.Melt.findByPk(meltId, { lock: true, rejectOnEmpty: true });
+    const melt = await lockMelt(services, meltId);
+    const event = judged(melt, request.event);
+    const recorded = await alreadyRecorded(services, melt, request.key, event);
+    if (recorded) return recorded;
     if (!can(meltPolicy.record, actor, melt)) {
       throw new AppError(
         'card-elsewhere',
         'This card went on at another terminal meanwhile. Scan the flask to see who has it.',
       );
     }
-    const event = judged(melt, request.event);
-    const recorded = await alreadyRecorded(services, melt, request.key, event);
-    if (recorded) return recorded;
     refuseUndecided(actor, melt, event);
     return appendEvent(services, actor, melt, { ...request, event });
   });

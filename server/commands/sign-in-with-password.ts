@@ -18,7 +18,7 @@ export const signInWithPassword = async (
 ): Promise<User> => {
   const outcome = await sequelize.transaction(async (): Promise<User | AppError> => {
     const user = await models.User.findOne({
-      where: where(fn('lower', col('login')), login.toLowerCase()),
+      where: where(fn('lower', col('login')), fn('lower', login)),
       lock: true,
     });
     if (!user?.active) {

@@ -9,29 +9,41 @@ import { refuseTakenLogin } from './refuse-taken-login.ts';
 
 type UpdatePerson = z.output<typeof updatePersonRequest>;
 
-/** Refuses to take the last owner away, which would lock everyone out of the studio. */
-const refuseLastOwner = async ({ models }: Services, user: User, change: UpdatePerson): Promise<void> => {
-  const staysOwner = (change.roles ?? user.roles).includes('owner') && (change.active ?? user.active);
-  if (staysOwner || !user.roles.includes('owner')) return;
-  // All owners are locked in one order, so that two owners cannot remove each other at the same moment.
-  const owners = await models.User.findAll({
-    where: { active: true, roles: { [Op.contains]: ['owner'] } },
+/**
+ * Locks a person's row with those of all owners, in one order, so that two owners can neither remove each other at the
+ * same moment nor wait for each other for ever.
+ */
+const lockWithOwners = async (
+  { models }: Services,
+  id: string,
+): Promise<{ readonly user: User; readonly owners: readonly User[] }> => {
+  const isOwner = { active: true, roles: { [Op.contains]: ['owner'] } };
+  const locked = await models.User.findAll({
+    where: { [Op.or]: [{ id }, isOwner] },
     order: ['id'],
     lock: true,
   });
-  if (owners.some(({ id }) => id !== user.id)) return;
+  const user = locked.find((candidate) => candidate.id === id);
+  if (!user) throw notFound('person');
+  return { user, owners: locked.filter(({ active, roles }) => active && roles.includes('owner')) };
+};
+
+/** Refuses to take the last owner away, which would lock everyone out of the studio. */
+const refuseLastOwner = (user: User, owners: readonly User[], change: UpdatePerson): void => {
+  const staysOwner = (change.roles ?? user.roles).includes('owner') && (change.active ?? user.active);
+  if (staysOwner || owners.length > 1 || owners[0]?.id !== user.id) return;
   throw new AppError('changed-meanwhile', 'The studio needs an owner. Make someone else an owner first.');
 };
 
 /** Changes a person; what the request leaves out stays. */
 export const updatePerson = async (services: Services, id: string, request: UpdatePerson): Promise<User> => {
-  const { models, secrets, sequelize } = services;
+  const { secrets, sequelize } = services;
   const { password, pin, ...plain } = request;
   const passwordHash = password === undefined ? undefined : await hashSecret(password);
   const pinHash = pin ? await hashSecret(pepperedPin(pin, secrets.pinPepper)) : pin;
   return sequelize.transaction(async () => {
-    await refuseLastOwner(services, (await models.User.findByPk(id)) ?? refuseMissing(), request);
-    const user = (await models.User.findByPk(id, { lock: true })) ?? refuseMissing();
+    const { user, owners } = await lockWithOwners(services, id);
+    refuseLastOwner(user, owners, request);
     return refuseTakenLogin(() =>
       user.update({
         ...plain,
@@ -40,8 +52,4 @@ export const updatePerson = async (services: Services, id: string, request: Upda
       }),
     );
   });
-};
-
-const refuseMissing = (): never => {
-  throw notFound('person');
 };

@@ -1,4 +1,6 @@
+import { UniqueConstraintError } from 'sequelize';
 import type { CastingState } from '#shared/domain/casting/casting-state.ts';
+import { AppError } from '../errors.ts';
 import type { Casting } from '../models/casting.ts';
 import type { Services } from '../services/services.ts';
 
@@ -16,5 +18,10 @@ export const writeCastingState = async (
     reason,
     userId,
   });
-  await casting.update({ state: to, stateReason: reason });
+  try {
+    await casting.update({ state: to, stateReason: reason });
+  } catch (error) {
+    if (!(error instanceof UniqueConstraintError)) throw error;
+    throw new AppError('wrong-state', `Its flask holds another casting by now, so it cannot become ${to}.`);
+  }
 };

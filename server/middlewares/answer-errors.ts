@@ -7,22 +7,43 @@ import type { Logger } from '../services/logger.ts';
 /** Codes with which PostgreSQL says that it is going down, coming up or full, rather than that a query is wrong. */
 const unavailableCodes = ['57P01', '57P02', '57P03', '53300', '08006', '08003', 'ECONNREFUSED', 'ECONNRESET'];
 
+/** What the driver says, without a code, of a connection that broke under a query or before it. */
+const brokenConnection = /^Connection terminated|is not queryable$|connection manager was closed/;
+
 const isUnavailable = (error: unknown): boolean => {
-  const { code, parent } = (error ?? {}) as { code?: string; parent?: { code?: string } };
+  const { code, parent, message } = (error ?? {}) as {
+    code?: string;
+    parent?: Error & { code?: string };
+    message?: string;
+  };
   return (
     error instanceof ConnectionError ||
     error instanceof ConnectionAcquireTimeoutError ||
-    unavailableCodes.includes(parent?.code ?? code ?? '')
+    unavailableCodes.includes(parent?.code ?? code ?? '') ||
+    brokenConnection.test(parent?.message ?? message ?? '')
   );
 };
+
+/** The status a library blames on the request: a file that is not there, a path that cannot be read. */
+const blamedStatus = (error: unknown): number | null => {
+  const { status } = (error ?? {}) as { status?: unknown };
+  return typeof status === 'number' && status >= 400 && status < 500 ? status : null;
+};
+
+const nothingHere = (): AppError => new AppError('not-found', 'There is nothing at this address.');
 
 const asAppError = (error: unknown): AppError | null => {
   if (error instanceof AppError) return error;
   if (isUnavailable(error))
     return new AppError('not-ready', 'The database is not ready. Nothing was stored; try again in a moment.');
-  // Express refuses a path it cannot decode before any route is asked.
-  if (error instanceof URIError) return new AppError('invalid-request', 'That address cannot be read.');
-  return null;
+  switch (blamedStatus(error)) {
+    case null:
+      return null;
+    case 404:
+      return nothingHere();
+    default:
+      return new AppError('invalid-request', 'That address cannot be read.');
+  }
 };
 
 const toProblem = ({ id, status, message, details }: AppError): Problem => ({
@@ -58,5 +79,5 @@ export const answerErrors =
 
 /** What is under `/api` and has no route. */
 export const unknownRoute: RequestHandler = () => {
-  throw new AppError('not-found', 'There is nothing at this address.');
+  throw nothingHere();
 };

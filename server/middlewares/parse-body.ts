@@ -19,19 +19,16 @@ export const parseBody = express.json({ limit: '256kb', reviver: refuseUnstorabl
 
 /** Turns what the body parser refuses into errors of our own. */
 export const explainBodyErrors: ErrorRequestHandler = (
-  error: { readonly type?: string },
+  error: Error & { readonly type?: string; readonly status?: number },
   _request,
   _response,
   next,
 ) => {
+  if (error instanceof AppError) return next(error);
   if (error.type === 'entity.too.large')
     return next(new AppError('too-large', 'The request is larger than 256 kB.'));
-  if (
-    error.type?.startsWith('entity.') ||
-    error.type?.endsWith('.unsupported') ||
-    error.type?.startsWith('request.')
-  ) {
+  // A body that cannot be unpacked carries a status and no type.
+  if (error.status !== undefined && error.status < 500)
     return next(new AppError('invalid-request', 'The request could not be read as JSON.'));
-  }
   return next(error);
 };

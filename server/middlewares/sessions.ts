@@ -6,6 +6,8 @@ import { placeOf, type Place } from './place.ts';
 
 declare module 'express-session' {
   interface SessionData {
+    /** The application it was opened in: a PIN never opens the desk. */
+    place?: Place;
     /** The terminal at which this session was signed in by PIN. */
     terminalId?: string;
   }

@@ -1,14 +1,15 @@
-import type { RequestHandler } from 'express';
+import type { Request, RequestHandler } from 'express';
 import { Passport } from 'passport';
 import { Strategy } from 'passport-local';
 import { signInWithPassword } from '../commands/sign-in-with-password.ts';
 import { signInWithPin } from '../commands/sign-in-with-pin.ts';
+import { AppError } from '../errors.ts';
 import type { Terminal } from '../models/terminal.ts';
 import type { User as StudioUser } from '../models/user.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
 import type { Http } from './http.ts';
-import { placeOf } from './place.ts';
+import { placeOf, type Place } from './place.ts';
 import { terminalOf } from './terminal-token.ts';
 
 type PassportInstance = InstanceType<typeof Passport>;
@@ -56,12 +57,15 @@ export const createPassport = (services: Services): PassportInstance => {
   return passport;
 };
 
-/** Who is asking: a terminal's session counts only at the very terminal it was opened at. */
+/** Whether a session was opened where it is used: in the same application, and a terminal's at that very terminal. */
+const isSessionHere = ({ session }: Request, place: Place, terminal: Terminal | null): boolean =>
+  session.place === place && (place === 'desk' || (terminal !== null && session.terminalId === terminal.id));
+
+/** Who is asking, with what they hold here. */
 const readActor = ({ request, response }: Http): Actor => {
   const { terminal } = response.locals;
   const place = placeOf(request);
-  const isHere = place === 'desk' || (terminal !== null && request.session.terminalId === terminal.id);
-  const person = isHere && request.user ? request.user : null;
+  const person = request.user && isSessionHere(request, place, terminal) ? request.user : null;
   return {
     person,
     terminal: terminal && { id: terminal.id, name: terminal.name, bay: terminal.bay },
@@ -92,13 +96,27 @@ const authenticate = ({ request, response }: Http, strategy: 'password' | 'pin')
     (passport.authenticate(strategy, done) as RequestHandler)(request, response, reject);
   });
 
+/** Where each way of signing in belongs. */
+const places = { password: 'desk', pin: 'terminal' } as const;
+
 /** Signs in by one of the two ways; the session is renewed, so that one fixed beforehand is worth nothing. */
-export const signIn = async (strategy: 'password' | 'pin', http: Http): Promise<void> => {
+export const signIn = async (
+  strategy: 'password' | 'pin',
+  http: Http,
+  credentials: object,
+): Promise<void> => {
   const { request, response } = http;
+  const place = places[strategy];
+  if (placeOf(request) !== place) {
+    throw new AppError('invalid-request', 'Passwords are for the desk, PINs for a terminal.');
+  }
+  // Passport's strategies read the body themselves; they get it as it was validated.
+  request.body = credentials;
   const user = await authenticate(http, strategy);
   await new Promise<void>((resolve, reject) => {
     request.logIn(user, (error?: unknown) => (error ? reject(error as Error) : resolve()));
   });
+  request.session.place = place;
   if (strategy === 'pin') request.session.terminalId = response.locals.terminal?.id;
 };
 

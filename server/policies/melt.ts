@@ -3,13 +3,17 @@ import type { Melt } from '../models/melt.ts';
 import { isAny, isAtTerminal, isSignedIn, type Actor } from './actor.ts';
 import type { Policy } from './policy.ts';
 
+const worksAtFurnace = (actor: Actor): boolean => isAtTerminal(actor) && isAny(actor, ...furnaceRoles);
+
 /** Who may write in the melt book, and read it. */
 export const meltPolicy = {
   list: { who: isSignedIn },
   read: { who: isSignedIn },
+  /** Whoever works at the furnace may deliver events; what becomes of them is the next sentence's. */
+  deliver: { who: worksAtFurnace },
   /** Only the terminal that holds the card writes to it. */
   record: {
-    who: (actor: Actor) => isAtTerminal(actor) && isAny(actor, ...furnaceRoles),
+    who: worksAtFurnace,
     when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
   },
   /** An apprentice ends no card and stands by no doubtful reading. */

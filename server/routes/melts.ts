@@ -33,13 +33,12 @@ const read = defineRoute({
 const record = defineRoute({
   method: 'post',
   path: '/api/melts/:id/events',
-  policy: meltPolicy.record,
+  policy: meltPolicy.deliver,
   params: idParams,
   body: recordEventRequest,
-  load: (services, params) => loadMelt(services, params.id),
   status: 201,
-  act: async ({ actor, services, subject, body }) => {
-    const event = await recordEvent(services, requireAtTerminal(actor), subject.id, body);
+  act: async ({ actor, services, params, body }) => {
+    const event = await recordEvent(services, requireAtTerminal(actor), params.id, body);
     return presentMeltEvent(await loadEvent(services, event.id));
   },
 });

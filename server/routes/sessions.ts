@@ -17,8 +17,8 @@ const signInAtDesk = defineRoute({
   path: '/api/session/desk',
   policy: sessionPolicy.use,
   body: signInRequest,
-  act: async ({ services, http }) => {
-    await signIn('password', http);
+  act: async ({ services, body, http }) => {
+    await signIn('password', http, body);
     return presentSession(actorOf(http), await loadStudio(services), services.now());
   },
 });
@@ -28,8 +28,8 @@ const signInAtTerminal = defineRoute({
   path: '/api/session/terminal',
   policy: sessionPolicy.usePin,
   body: pinSignInRequest,
-  act: async ({ services, http }) => {
-    await signIn('pin', http);
+  act: async ({ services, body, http }) => {
+    await signIn('pin', http, body);
     return presentSession(actorOf(http), await loadStudio(services), services.now());
   },
 });

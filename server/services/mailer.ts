@@ -16,8 +16,10 @@ const timeoutMs = 10_000;
 /** A mailer on the mail server at `smtpUrl` (`smtp://` or `smtps://`); without one, letters are only noted in the log. */
 export const createMailer = (smtpUrl: string | undefined, logger: Logger): Mailer => {
   if (smtpUrl === undefined) {
-    return async ({ subject }) =>
+    return ({ subject }) => {
       logger.info('No mail server is set (SMTP_URL), so a notice was not sent.', { subject });
+      return Promise.resolve();
+    };
   }
   const { hostname } = new URL(smtpUrl);
   const transport = createTransport(

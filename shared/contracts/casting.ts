@@ -13,7 +13,10 @@ export type MoveCastingRequest = z.input<typeof moveCastingRequest>;
 
 /** Which castings to list: those planned for one local day, or all still open. */
 export const listCastingsQuery = z.object({
-  on: z.iso.date('Write the day as year-month-day.').optional(),
+  on: z.iso
+    .date('Write the day as year-month-day.')
+    .refine((day) => day >= '2000-01-01' && day < '3000-01-01', 'Choose a day from the year 2000 on.')
+    .optional(),
 });
 
 /** An alloy as castings and melts name it. */

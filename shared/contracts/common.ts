@@ -29,8 +29,13 @@ export const temperatureC = z
   .min(-10, 'That is colder than any workshop.')
   .max(2000, 'That is hotter than any furnace here.');
 
-/** An ISO 8601 instant with its offset. */
-export const instant = z.iso.datetime({ offset: true, error: 'That is not a moment in time.' });
+/** A clock that has lost its time begins in 1970; no record is older than this. */
+const earliestMs = Date.UTC(2000, 0, 1);
+
+/** An ISO 8601 instant with its offset, from the year 2000 on. */
+export const instant = z.iso
+  .datetime({ offset: true, error: 'That is not a moment in time.' })
+  .refine((text) => Date.parse(text) >= earliestMs, 'That is before there were records: set the clock.');
 
 /** What the signed-in person may do with a record, sent beside it. */
 export type Abilities<Key extends string> = Readonly<Record<Key, boolean>>;

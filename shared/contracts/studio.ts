@@ -7,41 +7,51 @@ const celsius = z
   .number({ error: 'Type a temperature.' })
   .min(0, 'Not below 0.')
   .max(1500, 'Not above 1500.');
-const range = z.object({ low: celsius, high: celsius }).refine(({ low, high }) => low < high, {
-  error: 'The lower end must be below the upper end.',
+/** At least a degree wide, so that whole degrees always fit in: a card shows and judges whole ones. */
+const range = z.object({ low: celsius, high: celsius }).refine(({ low, high }) => high - low >= 1, {
+  error: 'The upper end must be at least 1 °C above the lower end.',
   path: ['high'],
 });
 const bands = z.object({ thin: range, medium: range, heavy: range });
 const source = words(600, 'Say where the figures come from.');
 
 /** The owner's tables, as sent to be stored. */
-export const processTables = z.object({
-  superheat: z.object({ vacuum: bands, centrifugal: bands }),
-  flask: z.object({ silver: bands, 'yellow-gold': bands, 'rose-gold': bands, 'white-gold': bands }),
-  flaskCooling: z
-    .array(
-      z.object({
-        diameterMm: z.number().min(20, 'At least 20 mm.').max(400, 'At most 400 mm.'),
-        perSecond: z.number().min(0.00005, 'Too slow to be a flask.').max(0.02, 'Too fast to be a flask.'),
-      }),
-    )
-    .min(1, 'Keep at least one flask size.')
-    .max(20),
-  flaskDropC: z.number().min(1, 'At least 1.').max(200, 'At most 200.'),
-  transferDropC: z.number().min(0, 'Not below 0.').max(100, 'At most 100.'),
-  roomC: z.number().min(-10, 'Not below -10.').max(50, 'At most 50.'),
-  waxDensityGPerCm3: z.number().min(0.7, 'Wax is denser than that.').max(1.3, 'Wax is lighter than that.'),
-  buttonShare: z.number().min(0, 'Not below 0.').max(2, 'At most 2.'),
-  sources: z.object({
-    superheat: source,
-    flask: source,
-    flaskCooling: source,
-    flaskDrop: source,
-    transferDrop: source,
-    wax: source,
-    button: source,
-  }),
-}) satisfies z.ZodType<ProcessTables>;
+export const processTables = z
+  .object({
+    superheat: z.object({ vacuum: bands, centrifugal: bands }),
+    flask: z.object({ silver: bands, 'yellow-gold': bands, 'rose-gold': bands, 'white-gold': bands }),
+    flaskCooling: z
+      .array(
+        z.object({
+          diameterMm: z.number().min(20, 'At least 20 mm.').max(400, 'At most 400 mm.'),
+          perSecond: z.number().min(0.00005, 'Too slow to be a flask.').max(0.02, 'Too fast to be a flask.'),
+        }),
+      )
+      .min(1, 'Keep at least one flask size.')
+      .max(20),
+    flaskDropC: z.number().min(1, 'At least 1.').max(200, 'At most 200.'),
+    transferDropC: z.number().min(0, 'Not below 0.').max(100, 'At most 100.'),
+    roomC: z.number().min(-10, 'Not below -10.').max(50, 'At most 50.'),
+    waxDensityGPerCm3: z.number().min(0.7, 'Wax is denser than that.').max(1.3, 'Wax is lighter than that.'),
+    buttonShare: z.number().min(0, 'Not below 0.').max(2, 'At most 2.'),
+    sources: z.object({
+      superheat: source,
+      flask: source,
+      flaskCooling: source,
+      flaskDrop: source,
+      transferDrop: source,
+      wax: source,
+      button: source,
+    }),
+  })
+  .refine(
+    ({ flask, flaskDropC, roomC }) =>
+      Object.values(flask).every((family) =>
+        Object.values(family).every(({ low }) => low - flaskDropC > roomC),
+      ),
+    // Such a flask could wait for ever, and the pour window would have no end.
+    { error: 'A flask that may cool by so much would be as cold as the room.', path: ['flaskDropC'] },
+  ) satisfies z.ZodType<ProcessTables>;
 
 /** The studio's limits, as sent to be stored. */
 export const studioLimits = z.object({
