@@ -6,7 +6,12 @@ export const ThemeButton = () => {
   const [theme, toggle] = useTheme();
   const isDay = theme === 'day';
   return (
-    <Button size="terminal" icon={isDay ? 'melt-room' : 'day'} className="!gap-3 !px-4" onClick={toggle}>
+    <Button
+      size="terminal"
+      icon={isDay ? 'melt-room' : 'day'}
+      className="!gap-3 !px-4 text-[28px] whitespace-nowrap"
+      onClick={toggle}
+    >
       {isDay ? 'Melt room' : 'Day'}
     </Button>
   );

@@ -87,7 +87,7 @@ export const identify =
 export const actorOf = (http: Http): Actor => readActor(http);
 
 const asError = (error: unknown): Error =>
-  error instanceof Error ? error : new Error('Sign-in gave neither a person nor a reason.');
+  error instanceof Error ? error : new Error('Passport failed and gave no reason.');
 
 const authenticate = ({ request, response }: Http, strategy: 'password' | 'pin'): Promise<Express.User> =>
   new Promise((resolve, reject) => {
