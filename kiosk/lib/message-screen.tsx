@@ -18,9 +18,9 @@ export const MessageScreen = ({ state, mark, sentence, children, actions }: Mess
   <div className="grid h-dvh grid-rows-[minmax(0,1fr)_auto] gap-6 bg-ground px-8 pt-8 pb-7 text-ink">
     <main className="grid content-center gap-8 overflow-y-auto px-4">
       <StateMark state={state} text={mark} size="terminal" />
-      <h1 role="alert" className="max-w-[24em] text-[52px] leading-[1.16] font-black text-balance">
-        {sentence}
-      </h1>
+      <div role="alert">
+        <h1 className="max-w-[24em] text-[52px] leading-[1.16] font-black text-balance">{sentence}</h1>
+      </div>
       {children ? <div className="text-[28px] leading-snug text-soft">{children}</div> : null}
     </main>
     <footer className="terminal-actions">{actions}</footer>

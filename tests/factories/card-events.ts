@@ -1,5 +1,6 @@
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import { defaultInstruction } from '#shared/domain/pour-card/work-instruction.ts';
 import { cardSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 
 /** A step a built card can be led to. */
@@ -11,7 +12,7 @@ const eventsOf = (
 ): readonly CardEvent[] => {
   switch (step) {
     case 'guard':
-      return [{ type: 'guard-confirmed', prompts: ['face', 'hands'] }];
+      return [{ type: 'guard-confirmed', prompts: defaultInstruction.prompts.map(({ key }) => key) }];
     case 'charge':
       return [{ type: 'charge-weighed', kind: 'grain', massG: plannedMetalG }, { type: 'charge-closed' }];
     case 'melt':

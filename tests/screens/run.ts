@@ -1,4 +1,5 @@
 import { rm } from 'node:fs/promises';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { ensureClients } from '#server/services/clients-build.ts';
 import { launchChromium } from '#tests/support/chromium.ts';
@@ -24,6 +25,13 @@ try {
   await captureDesk(browser, studio, capture);
   await captureTerminal(browser, studio, capture);
   say(`All pictures are in ${folder}.`);
+} catch (error) {
+  // What the page showed when the walk stuck tells more than the error.
+  const pages = browser.contexts().flatMap((context) => context.pages());
+  for (const [index, page] of pages.entries()) {
+    await page.screenshot({ path: join(folder, `stuck-${index + 1}.png`) });
+  }
+  throw error;
 } finally {
   await browser.close();
   await studio.close();

@@ -24,11 +24,11 @@ export const driveTerminal = (page: Page, origin: string) => {
     hold: (name: string | RegExp): Promise<void> => hold(button(name)),
     type,
 
-    /** Makes this browser a terminal with the demo studio's one-time code. */
-    enrol: async (): Promise<void> => {
+    /** Makes this browser a terminal with a one-time code, the demo studio's own unless told otherwise. */
+    enrol: async (code = demoEnrolmentCode): Promise<void> => {
       await page.goto(`${origin}/kiosk`);
       await page.getByRole('heading', { name: /not a terminal yet/ }).waitFor();
-      await type(demoEnrolmentCode.replace(/\D/g, ''));
+      await type(code.replace(/\D/g, ''));
       await button('Enrol this terminal').click();
       await page.getByRole('heading', { name: /who/i }).waitFor();
     },
@@ -47,6 +47,11 @@ export const driveTerminal = (page: Page, origin: string) => {
     scanWithWedge: async (code: string): Promise<void> => {
       await page.keyboard.type(code);
       await page.keyboard.press('Enter');
+    },
+
+    /** Opens a casting's card by its address. */
+    openCard: async (castingId: string): Promise<void> => {
+      await page.goto(`${origin}/kiosk/cards/${castingId}`);
     },
 
     /** Touches every caution, then holds. */
