@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { faultOfMass } from '#shared/lib/plausible-mass.ts';
 
 /** Path parameter naming one record. */
 export const idParams = z.object({ id: z.uuid('That is not a record of ours.') });
@@ -11,17 +12,17 @@ export const words = (max: number, empty: string) =>
 export const optionalWords = (max: number) =>
   z.string().trim().max(max, `Keep it under ${max} characters.`).default('');
 
+const plausibleMass = (options: { readonly mayBeNone: boolean }) =>
+  z.number({ error: 'Type a mass in numbers.' }).superRefine((grams, context) => {
+    const message = faultOfMass(grams, options);
+    if (message !== null) context.addIssue({ code: 'custom', message });
+  });
+
 /** A mass in grams that a studio could weigh: above zero, at most 100 kg. */
-export const massG = z
-  .number({ error: 'Type a mass in numbers.' })
-  .positive('A mass must be above zero.')
-  .max(100_000, 'That is more than a studio could melt: check the unit.');
+export const massG = plausibleMass({ mayBeNone: false });
 
 /** A mass in grams that may be nothing. */
-export const massOrNoneG = z
-  .number({ error: 'Type a mass in numbers.' })
-  .nonnegative('A mass cannot be below zero.')
-  .max(100_000, 'That is more than a studio could melt: check the unit.');
+export const massOrNoneG = plausibleMass({ mayBeNone: true });
 
 /** A temperature in °C within what a workshop can meet. */
 export const temperatureC = z

@@ -1,5 +1,5 @@
-import { massG, massOrNoneG } from '#shared/contracts/common.ts';
 import { parseDecimal } from '#shared/lib/decimal.ts';
+import { faultOfMass } from '#shared/lib/plausible-mass.ts';
 import { ok, refuse, type Result } from '#shared/lib/result.ts';
 import { toGrams, type MassUnit } from '#shared/lib/units.ts';
 
@@ -7,6 +7,7 @@ import { toGrams, type MassUnit } from '#shared/lib/units.ts';
 export const readTypedMass = (text: string, unit: MassUnit, mayBeNone = false): Result<number> => {
   const typed = parseDecimal(text);
   if (!typed.ok) return typed;
-  const judged = (mayBeNone ? massOrNoneG : massG).safeParse(toGrams(typed.value, unit));
-  return judged.success ? ok(judged.data) : refuse(judged.error.issues[0]?.message ?? 'Type a mass.');
+  const grams = toGrams(typed.value, unit);
+  const fault = faultOfMass(grams, { mayBeNone });
+  return fault === null ? ok(grams) : refuse(fault);
 };

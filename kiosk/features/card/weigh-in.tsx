@@ -18,14 +18,14 @@ export const chargeKindWords: Readonly<Record<ChargeKind, string>> = {
 
 /** One weighing into the crucible. */
 export const WeighIn = ({ running, kind, onDone }: WeighInProps) => {
-  const { mass: now, stateWords } = chargeWords(running.state, running.card.context, running.write);
+  const { mass, state, stateWords } = chargeWords(running.state, running.card.context, running.write);
   return (
     <MassEntry
       running={running}
       sentence={`How much ${chargeKindWords[kind]} goes in?`}
       label={`Mass of ${chargeKindWords[kind]}`}
-      actionWords={(mass) => `Put in ${mass}`}
-      sub={`${now}. ${stateWords}.`}
+      actionWords={(typed) => `Put in ${typed}`}
+      sub={state === 'wait' ? `${stateWords}: ${mass}.` : `${stateWords}.`}
       onCancel={onDone}
       onMass={(massG) => {
         if (running.record({ type: 'charge-weighed', kind, massG })) onDone();
