@@ -1,7 +1,7 @@
 import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { NumberPad } from '#src/ui/number-pad.tsx';
-import { useEffect, useRef, useState } from 'react';
+import { useState } from 'react';
 
 /** Props of {@link CodePad}. */
 export interface CodePadProps {
@@ -12,9 +12,6 @@ export interface CodePadProps {
 /** A pad for the number on a flask, its small last digit included. */
 export const CodePad = ({ onClose, onCode }: CodePadProps) => {
   const [digits, setDigits] = useState('');
-  const find = useRef<HTMLButtonElement>(null);
-  // The dialog gives the focus to its cross; Enter after the digits must find the flask instead.
-  useEffect(() => find.current?.focus(), []);
   const isEnough = digits.length >= 5;
   const send = (): void => {
     if (isEnough) onCode(digits);
@@ -26,13 +23,7 @@ export const CodePad = ({ onClose, onCode }: CodePadProps) => {
       title="Type the flask’s number"
       size="terminal"
       actions={
-        <Button
-          ref={find}
-          kind={isEnough ? 'main' : 'blocked'}
-          size="terminal"
-          className="flex-1"
-          onClick={send}
-        >
+        <Button kind={isEnough ? 'main' : 'blocked'} size="terminal" className="flex-1" onClick={send}>
           {isEnough ? 'Find this flask' : 'All digits, the small last one too'}
         </Button>
       }

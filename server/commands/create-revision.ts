@@ -11,6 +11,8 @@ import { lockRow } from './lock-row.ts';
 
 type RevisionValues = z.output<typeof createRevisionRequest>;
 
+const metalNames = { Ag: 'silver', Au: 'gold' } as const;
+
 /** Fineness is never rounded up: a mark above what the composition holds is refused. */
 const refuseHighMark = ({ family }: Alloy, { compositionWt, fineness }: RevisionValues): void => {
   const metal = markedMetal(family);
@@ -18,7 +20,7 @@ const refuseHighMark = ({ family }: Alloy, { compositionWt, fineness }: Revision
   if (fineness <= held + 1e-9) return;
   throw fieldError(
     'fineness',
-    `The composition holds ${held.toFixed(1)} parts per thousand of ${metal}; it cannot be marked ${fineness}.`,
+    `The composition holds ${held.toFixed(1)} parts per thousand of ${metalNames[metal]}; it cannot be marked ${fineness}.`,
   );
 };
 

@@ -13,6 +13,7 @@ import { cardContextOf } from '../queries/card-context.ts';
 import { loadCasting, type LoadedCasting } from '../queries/load-casting.ts';
 import { loadInstruction } from '../queries/load-instruction.ts';
 import { loadStudio } from '../queries/load-studio.ts';
+import { refuseUnapprovedAlloy } from '../queries/refuse-unapproved-alloy.ts';
 import type { Services } from '../services/services.ts';
 import { appendEvent } from './append-event.ts';
 import { occurredBetween } from './occurred-between.ts';
@@ -53,19 +54,15 @@ const nextMeltNumber = async ({ sequelize }: Services): Promise<number> => {
   return rows[0].number;
 };
 
-const refuseUnready = ({ state, alloyRevision }: LoadedCasting): void => {
+const refuseUnready = (casting: LoadedCasting): void => {
+  const { state } = casting;
   if (state !== 'holding') {
     throw new AppError(
       'wrong-state',
       `This flask is ${describeCastingState(state)}. A card opens when the flask is holding.`,
     );
   }
-  if (alloyRevision.status !== 'approved') {
-    throw new AppError(
-      'alloy-not-approved',
-      `Revision ${alloyRevision.number} of ${alloyRevision.alloy.name} is not approved. Ask the owner to approve it or to plan another.`,
-    );
-  }
+  refuseUnapprovedAlloy(casting);
 };
 
 const begin = async (

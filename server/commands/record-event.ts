@@ -22,6 +22,18 @@ const refuseUndecided = (actor: AtTerminal, melt: Melt, event: CardEvent): void 
   throw new AppError('not-allowed', 'A caster or the owner has to decide this. Ask one to sign in here.');
 };
 
+/** Refuses a guard that leaves out a caution of the instruction this melt was opened with. */
+const refuseUnguarded = async ({ models }: Services, melt: Melt, event: CardEvent): Promise<void> => {
+  if (event.type !== 'guard-confirmed') return;
+  const { content } = await models.WorkInstructionRevision.findByPk(melt.workInstructionRevisionId, {
+    rejectOnEmpty: true,
+  });
+  const open = content.prompts.filter(({ key }) => !event.prompts.includes(key));
+  if (open.length === 0) return;
+  const sentences = open.map(({ sentence }) => sentence).join(' ');
+  throw new AppError('event-refused', `Every caution has to be confirmed. Still open: ${sentences}`);
+};
+
 /** Judges a reading as the terminal does, whatever the terminal did; returns it with `confirmed` only where it was needed. */
 const judged = (melt: Melt, event: CardEvent): CardEvent => {
   if (event.type !== 'reading-taken') return event;
@@ -73,5 +85,6 @@ export const recordEvent = (
       );
     }
     refuseUndecided(actor, melt, event);
+    await refuseUnguarded(services, melt, event);
     return appendEvent(services, actor, melt, { ...request, event });
   });

@@ -5,6 +5,7 @@ import { AppError, notFound } from '../errors.ts';
 import type { User } from '../models/user.ts';
 import { hashSecret, pepperedPin } from '../services/hashing.ts';
 import type { Services } from '../services/services.ts';
+import { endOtherSessions } from './end-other-sessions.ts';
 import { refuseTakenLogin } from './refuse-taken-login.ts';
 
 type UpdatePerson = z.output<typeof updatePersonRequest>;
@@ -35,8 +36,16 @@ const refuseLastOwner = (user: User, owners: readonly User[], change: UpdatePers
   throw new AppError('changed-meanwhile', 'The studio needs an owner. Make someone else an owner first.');
 };
 
-/** Changes a person; what the request leaves out stays. */
-export const updatePerson = async (services: Services, id: string, request: UpdatePerson): Promise<User> => {
+/**
+ * Changes a person; what the request leaves out stays. A new password or PIN ends the person's sessions, but for the
+ * one that asks for it.
+ */
+export const updatePerson = async (
+  services: Services,
+  id: string,
+  request: UpdatePerson,
+  askingSessionId: string,
+): Promise<User> => {
   const { secrets, sequelize } = services;
   const { password, pin, ...plain } = request;
   const passwordHash = password === undefined ? undefined : await hashSecret(password);
@@ -44,6 +53,7 @@ export const updatePerson = async (services: Services, id: string, request: Upda
   return sequelize.transaction(async () => {
     const { user, owners } = await lockWithOwners(services, id);
     refuseLastOwner(user, owners, request);
+    if (password !== undefined || pin !== undefined) await endOtherSessions(services, id, askingSessionId);
     return refuseTakenLogin(() =>
       user.update({
         ...plain,

@@ -3,10 +3,12 @@ import { parseFlaskCode, splitCode } from '#shared/lib/codes.ts';
 import { AppError } from '../errors.ts';
 import type { Services } from '../services/services.ts';
 import { loadCasting, type LoadedCasting } from './load-casting.ts';
+import { refuseUnapprovedAlloy } from './refuse-unapproved-alloy.ts';
+
+const isRunning = ({ melt }: LoadedCasting): boolean => melt !== null && melt.overAt === null;
 
 /** Whether there is something for a terminal to do: a card to open, or one that is still running. */
-const hasCard = (casting: LoadedCasting): boolean =>
-  casting.state === 'holding' || (casting.melt !== null && casting.melt.overAt === null);
+const hasCard = (casting: LoadedCasting): boolean => casting.state === 'holding' || isRunning(casting);
 
 /** Finds what a scanned or typed code means; each way it can fail is one sentence with what to do. */
 export const findCard = async (services: Services, text: string): Promise<LoadedCasting> => {
@@ -34,5 +36,7 @@ export const findCard = async (services: Services, text: string): Promise<Loaded
       `${main} is ${describeCastingState(casting.state)}${reason}. A card opens when it is holding.`,
     );
   }
+  // A card that runs keeps the figures it was opened with, whatever became of the revision since.
+  if (!isRunning(casting)) refuseUnapprovedAlloy(casting);
   return casting;
 };

@@ -16,9 +16,13 @@ const authenticate = (actor: Actor, { who, refusal }: Policy<unknown>): void => 
   throw new AppError('not-allowed', 'Your roles do not allow this. Ask the owner.');
 };
 
+/** What is said where a contract has no sentence of its own. */
+const explain: z.core.$ZodErrorMap = ({ input }) =>
+  input === undefined ? 'Something is missing from the request.' : 'The request is not in the form expected.';
+
 const validate = <Value>(schema: z.ZodType<Value> | undefined, value: unknown): Value => {
   if (!schema) return undefined as Value;
-  const parsed = schema.safeParse(value);
+  const parsed = schema.safeParse(value, { error: explain });
   if (parsed.success) return parsed.data;
   const fields: FieldProblem[] = parsed.error.issues.map(({ path, message }) => ({
     path: path.join('.'),

@@ -37,8 +37,8 @@ const update = defineRoute({
   policy: personPolicy.update,
   params: idParams,
   body: updatePersonRequest,
-  act: async ({ actor, services, params, body }) =>
-    presentPerson(await updatePerson(services, params.id, body), actor),
+  act: async ({ actor, services, params, body, http }) =>
+    presentPerson(await updatePerson(services, params.id, body, http.request.sessionID), actor),
 });
 
 const unlock = defineRoute({

@@ -36,6 +36,7 @@ export const Button = ({
       onClick={press}
       aria-disabled={inert || undefined}
       aria-busy={busy || undefined}
+      data-kind={kind}
       className={buttonClass({ kind, size }, className)}
     >
       {busy ? <Spinner /> : icon ? <Icon name={icon} /> : null}

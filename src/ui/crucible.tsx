@@ -30,9 +30,12 @@ const sentence = ({ lots, wantedG, format }: Omit<CrucibleProps, 'className'>): 
     `Wanted in all: ${format(wantedG)}.`,
   ].join(' ');
 
+/** A written mass without its unit. */
+const figureOf = (written: string): string => written.split(/\s/)[0] ?? written;
+
 const progressWords = ({ inG, plannedG }: CrucibleLabel, format: (grams: number) => string): string => {
   if (inG === 0) return `${format(plannedG)} to come`;
-  return inG < plannedG ? `${format(inG)} of ${format(plannedG)}` : `${format(inG)} in`;
+  return inG < plannedG ? `${figureOf(format(inG))} of ${format(plannedG)}` : `${format(inG)} in`;
 };
 
 /** The crucible as it fills: a layer for each lot, hatching for what is still to come, and a line at the metal wanted. */
@@ -41,7 +44,7 @@ export const Crucible = ({ lots, wantedG, format, className }: CrucibleProps) =>
   const { layers, labels, wantedY } = crucibleLayers(lots, wantedG, inner.top, inner.bottom);
   return (
     <svg
-      viewBox="0 0 520 424"
+      viewBox="0 0 564 424"
       role="img"
       aria-label={sentence({ lots, wantedG, format })}
       className={className ?? 'w-full'}

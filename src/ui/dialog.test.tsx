@@ -1,6 +1,7 @@
 import { fireEvent, render, screen } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
 import { describe, expect, it, vi } from 'vitest';
+import { Button } from './button.tsx';
 import { Dialog } from './dialog.tsx';
 
 const show = (dismissible?: boolean) => {
@@ -37,5 +38,30 @@ describe('Dialog', () => {
     expect(screen.queryByRole('button', { name: 'Close' })).toBeNull();
     await userEvent.click(dialog);
     expect(onClose).not.toHaveBeenCalled();
+  });
+
+  it('begins at the first field, or else at the main action, never at its cross', () => {
+    const { rerender } = render(
+      <Dialog
+        open
+        title="Which?"
+        onClose={vi.fn()}
+        actions={
+          <>
+            <Button>Not yet</Button>
+            <Button kind="main">Do it</Button>
+          </>
+        }
+      >
+        <p>Choose.</p>
+      </Dialog>,
+    );
+    expect(screen.getByRole('button', { name: 'Do it' })).toHaveFocus();
+    rerender(
+      <Dialog key="field" open title="Why?" onClose={vi.fn()} actions={<Button kind="main">Store</Button>}>
+        <input aria-label="Reason" />
+      </Dialog>,
+    );
+    expect(screen.getByRole('textbox', { name: 'Reason' })).toHaveFocus();
   });
 });

@@ -20,6 +20,16 @@ const sizes = {
   terminal: { box: 'w-[min(920px,94vw)] p-10 gap-7 text-2xl', title: 'text-4xl', cross: 'size-18' },
 } as const;
 
+const stops = [
+  '[data-part="content"] :is(input, select, textarea):enabled',
+  '[data-part="actions"] button[data-kind="main"]',
+  '[data-part="actions"] button',
+];
+
+/** Where the focus begins: the first field, or else the main action; left to the browser, it would be the cross. */
+const firstStop = (dialog: HTMLDialogElement): HTMLElement | undefined =>
+  stops.flatMap((stop) => dialog.querySelector<HTMLElement>(stop) ?? []).at(0);
+
 /** A modal question or explanation, on the browser's own dialog element, which keeps the focus inside. */
 export const Dialog = ({
   open,
@@ -35,7 +45,10 @@ export const Dialog = ({
   const look = sizes[size];
   useEffect(() => {
     const element = dialog.current;
-    if (open && element && !element.open) element.showModal();
+    if (open && element && !element.open) {
+      element.showModal();
+      firstStop(element)?.focus();
+    }
     return () => element?.close();
   }, [open]);
   if (!open) return null;
@@ -53,7 +66,7 @@ export const Dialog = ({
       className="m-auto max-h-[94dvh] overflow-auto rounded-[26px] border-[3px] border-ink bg-panel p-0 text-ink"
     >
       <div className={`grid ${look.box}`}>
-        <header className="flex items-start justify-between gap-6">
+        <div className="flex items-start justify-between gap-6">
           <h2 id={heading} className={`font-black ${look.title}`}>
             {title}
           </h2>
@@ -67,9 +80,13 @@ export const Dialog = ({
               <Icon name="cross" className={size === 'terminal' ? 'size-9' : 'size-5'} />
             </button>
           ) : null}
-        </header>
-        <div>{children}</div>
-        {actions ? <footer className="flex flex-wrap gap-4">{actions}</footer> : null}
+        </div>
+        <div data-part="content">{children}</div>
+        {actions ? (
+          <div data-part="actions" className="flex flex-wrap gap-4">
+            {actions}
+          </div>
+        ) : null}
       </div>
     </dialog>
   );

@@ -88,6 +88,7 @@ export const HoldButton = ({
         aria-disabled={disabled || undefined}
         aria-describedby={hint}
         data-phase={phase}
+        data-kind={disabled ? 'blocked' : kind}
         className={buttonClass({ kind: disabled ? 'blocked' : kind, size }, `touch-none ${className ?? ''}`)}
       >
         <HoldRing phase={phase} holdMs={holdMs} />

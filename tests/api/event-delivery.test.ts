@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import type { MeltEvent } from '#shared/contracts/card.ts';
+import { guarded } from '#tests/factories/card-events.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { openCard } from '#tests/support/ask-for-card.ts';
 import { deliverEvent } from '#tests/support/deliver-event.ts';
@@ -19,7 +20,7 @@ afterAll(() => server.close());
 let meltId = '';
 beforeEach(async () => {
   ({ meltId } = await openCard(terminal.client, (await buildCasting(server.services)).id));
-  await deliverEvent(terminal.client, meltId, { type: 'guard-confirmed', prompts: ['face'] }).expect(201);
+  await deliverEvent(terminal.client, meltId, guarded).expect(201);
 });
 
 const weigh = (massG: number) => ({ type: 'charge-weighed', kind: 'grain', massG });

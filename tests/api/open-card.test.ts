@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import type { PourCard } from '#shared/contracts/card.ts';
 import { defaultStudioLimits } from '#shared/domain/studio/studio-limits.ts';
+import { guarded } from '#tests/factories/card-events.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildMelt } from '#tests/factories/build-melt.ts';
 import { buildTerminal } from '#tests/factories/build-terminal.ts';
@@ -113,20 +114,19 @@ describe('carrying a card on', () => {
       abilities: { record: true },
       events: [{ seq: 1 }, { seq: 2, event: { type: 'carried-on' }, terminal: second.terminal.name }],
     });
-    const late = await deliverEvent(here.client, meltId, { type: 'guard-confirmed', prompts: [] });
+    const late = await deliverEvent(here.client, meltId, guarded);
     expect([late.status, problemIdOf(late)]).toEqual([409, 'card-elsewhere']);
-    await deliverEvent(second.client, meltId, { type: 'guard-confirmed', prompts: [] }).expect(201);
+    await deliverEvent(second.client, meltId, guarded).expect(201);
   });
 
   it('answers the terminal that lost the card as before, for what it had already delivered', async () => {
     const { id } = await buildCasting(server.services);
     const { meltId } = await openCard(here.client, id);
     const key = randomUUID();
-    const event = { type: 'guard-confirmed', prompts: [] };
-    const first = await deliverEvent(here.client, meltId, event, { key }).expect(201);
+    const first = await deliverEvent(here.client, meltId, guarded, { key }).expect(201);
     const second = await server.terminalAs(here.user);
     await askForCard(second.client, id, { carryOn: true }).expect(200);
-    expect((await deliverEvent(here.client, meltId, event, { key }).expect(201)).body).toEqual(first.body);
+    expect((await deliverEvent(here.client, meltId, guarded, { key }).expect(201)).body).toEqual(first.body);
   });
 
   it('is not for someone else’s card elsewhere', async () => {

@@ -1,6 +1,6 @@
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import type { Person } from '#shared/contracts/person.ts';
-import { buildUser } from '#tests/factories/build-user.ts';
+import { buildUser, PASSWORD } from '#tests/factories/build-user.ts';
 import { bodyOf } from '#tests/support/body-of.ts';
 import { problemIdOf, sentenceOf } from '#tests/support/problem-id.ts';
 import { startTestServer, type SignedInClient, type TestServer } from '#tests/support/test-server.ts';
@@ -96,6 +96,30 @@ describe('changing a person', () => {
       hasPin: false,
     });
     expect((await user.reload()).passwordHash).toBe(user.passwordHash);
+  });
+
+  it('ends the person’s sessions with a new password or PIN, but for the one that asks', async () => {
+    for (const values of [{ password: 'another long password' }, { pin: '909090' }]) {
+      const atDesk = await server.deskAs('caster');
+      const atTerminal = await server.terminalAs(atDesk.user);
+      await change(atDesk.user.id, { name: 'Renamed' }).expect(200);
+      await atDesk.client.get('/api/castings').expect(200);
+      await change(atDesk.user.id, values).expect(200);
+      await atDesk.client.get('/api/castings').expect(401);
+      await atTerminal.client.get('/api/castings').expect(401);
+    }
+    const elsewhere = await server.deskAs(owner.user);
+    await change(owner.user.id, { password: PASSWORD }).expect(200);
+    await elsewhere.client.get('/api/castings').expect(401);
+    await owner.client.get('/api/castings').expect(200);
+  });
+
+  it('says in our own words that there is nothing in the request', async () => {
+    const response = await owner.client.post('/api/people');
+    expect([problemIdOf(response), sentenceOf(response)]).toEqual([
+      'invalid-request',
+      'Something is missing from the request.',
+    ]);
   });
 
   it('refuses an empty change, a taken name and a person who is not there', async () => {

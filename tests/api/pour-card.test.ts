@@ -3,7 +3,7 @@ import type { PourCard } from '#shared/contracts/card.ts';
 import type { Melt } from '#shared/contracts/melt.ts';
 import { foldCard } from '#shared/domain/pour-card/apply-event.ts';
 import { buildCasting, PLANNED_G } from '#tests/factories/build-casting.ts';
-import { eventsTo } from '#tests/factories/card-events.ts';
+import { eventsTo, guarded } from '#tests/factories/card-events.ts';
 import { openCard } from '#tests/support/ask-for-card.ts';
 import { deliverEvent } from '#tests/support/deliver-event.ts';
 import { problemIdOf, sentenceOf } from '#tests/support/problem-id.ts';
@@ -138,6 +138,18 @@ describe('an apprentice', () => {
   });
 });
 
+describe('the guard', () => {
+  it('closes only with every caution of the instruction, and names those left open', async () => {
+    for (const prompts of [[], guarded.prompts.slice(1), ['face', 'face', 'none of ours']]) {
+      const response = await deliver({ ...guarded, prompts });
+      expect([response.status, problemIdOf(response)]).toEqual([409, 'event-refused']);
+      expect(sentenceOf(response)).toMatch(/^Every caution has to be confirmed\. Still open: \S/);
+    }
+    expect((await readMelt()).events).toHaveLength(1);
+    await deliver(guarded).expect(201);
+  });
+});
+
 describe('when something happened', () => {
   const openedAt = Date.parse(START);
   const at = (seconds: number): string => new Date(openedAt + seconds * 1000).toISOString();
@@ -145,10 +157,7 @@ describe('when something happened', () => {
   it('is the terminal’s own moment, never in the future and never before the event it follows', async () => {
     server.advance(100);
     const now = server.services.now().toISOString();
-    const guard = await deliver(
-      { type: 'guard-confirmed', prompts: ['face'] },
-      { occurredAt: at(40) },
-    ).expect(201);
+    const guard = await deliver(guarded, { occurredAt: at(40) }).expect(201);
     expect(guard.body).toMatchObject({ occurredAt: at(40), recordedAt: now });
     const weigh = { type: 'charge-weighed', kind: 'grain', massG: 10 };
     expect((await deliver(weigh, { occurredAt: at(10) })).body).toMatchObject({
@@ -175,7 +184,7 @@ describe('when something happened', () => {
     1_764_583_200_000,
     null,
   ])('is refused as %j', async (occurredAt) => {
-    const response = await deliver({ type: 'guard-confirmed', prompts: [] }, { occurredAt });
+    const response = await deliver(guarded, { occurredAt });
     expect(problemIdOf(response)).toBe('invalid-request');
   });
 });

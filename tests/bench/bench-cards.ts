@@ -5,6 +5,7 @@ import { buildFlaskCode } from '#shared/lib/codes.ts';
 import { startTestCluster } from '../support/test-cluster.ts';
 import { serveStudio } from '../support/served-studio.ts';
 import { cloneTemplate } from '../support/template-database.ts';
+import { guarded } from '#tests/factories/card-events.ts';
 
 const rounds = 200;
 
@@ -53,7 +54,7 @@ export const benchCards = async (): Promise<Record<string, number>> => {
         .post(`/api/melts/${opened.body.melt.id}/events`)
         .send({ ...stamp(), event })
         .expect(201);
-    await record({ type: 'guard-confirmed', prompts: [] });
+    await record(guarded);
     await record({ type: 'charge-weighed', kind: 'grain', massG: context.plannedMetalG });
     await record({ type: 'charge-closed' });
     const temperatureC = context.figures.pourC.target;

@@ -6,13 +6,19 @@ import { cardSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts'
 /** A step a built card can be led to. */
 export type ReachableStep = CardStep | 'done';
 
+/** The guard with every caution of the default instruction confirmed. */
+export const guarded = {
+  type: 'guard-confirmed',
+  prompts: defaultInstruction.prompts.map(({ key }) => key),
+} as const satisfies CardEvent;
+
 const eventsOf = (
   step: CardStep,
   { figures, plannedMetalG }: Pick<CardContext, 'figures' | 'plannedMetalG'>,
 ): readonly CardEvent[] => {
   switch (step) {
     case 'guard':
-      return [{ type: 'guard-confirmed', prompts: defaultInstruction.prompts.map(({ key }) => key) }];
+      return [guarded];
     case 'charge':
       return [{ type: 'charge-weighed', kind: 'grain', massG: plannedMetalG }, { type: 'charge-closed' }];
     case 'melt':

@@ -44,7 +44,7 @@ export const EnrolScreen = ({ studioName }: { readonly studioName: string }) => 
             {sentenceOf(enrol.error)}
           </span>
         ) : (
-          'At the desk the owner opens People and terminals, adds a terminal, and reads out its eight digits. The code works once.'
+          'At the desk the owner opens Terminals, makes a code, and reads out its eight digits. The code works once.'
         )
       }
       gauge={

@@ -1,6 +1,6 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useEffect } from 'react';
-import { Navigate, useNavigate, useSearchParams } from 'react-router-dom';
+import { Navigate, useLocation, useNavigate, useSearchParams } from 'react-router-dom';
 import { cardQuery, findCard } from '#src/api/cards.ts';
 import { sentenceOf, UnreachableError } from '#src/lib/http.ts';
 import { Button } from '#src/ui/button.tsx';
@@ -12,6 +12,8 @@ import { addressOfCode, refusalOfCode } from '#kiosk/lib/scan-target.ts';
 /** Looks a scanned or typed code up and goes to its card, or says why not. */
 export const FindFlask = () => {
   const code = useSearchParams()[0].get('code') ?? '';
+  // A new visit for each scan, so that the same flask shown again is looked up again.
+  const { key: visit } = useLocation();
   const navigate = useNavigate();
   const refusal = refusalOfCode(code);
   useScanner((next) => {
@@ -19,7 +21,7 @@ export const FindFlask = () => {
     return true;
   });
   return refusal === null ? (
-    <Lookup key={code} code={code} />
+    <Lookup key={visit} code={code} />
   ) : (
     <RefusedCode code={code} sentence={refusal} />
   );

@@ -1,8 +1,8 @@
 import { useEffect, useState, type RefObject } from 'react';
 
-/** The width of an element in CSS pixels, followed as it changes; 0 until it is known. */
-export const useWidth = (element: RefObject<HTMLElement | null>): number => {
-  const [width, setWidth] = useState(0);
+/** The width of an element in CSS pixels, followed as it changes; `fallback` until it is known. */
+export const useWidth = (element: RefObject<HTMLElement | null>, fallback = 0): number => {
+  const [width, setWidth] = useState(fallback);
   useEffect(() => {
     const { current } = element;
     if (!current) return;

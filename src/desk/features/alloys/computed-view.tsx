@@ -1,8 +1,9 @@
-import { useMemo } from 'react';
+import { useMemo, useRef } from 'react';
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { equilibrium, tieLine, type MeltingRange } from '#shared/metallurgy/index.ts';
 import { Spinner } from '#src/ui/spinner.tsx';
 import type { StudioWriting } from '../../parts/use-studio.ts';
+import { useWidth } from '../../parts/use-width.ts';
 import { AtTemperature } from './at-temperature.tsx';
 import { beamOfState } from './beam-of-state.ts';
 import { writeWt } from './element-names.ts';
@@ -15,7 +16,6 @@ import { phasesSentence } from './phase-words.ts';
 import { FreezingTable } from './picture-tables.tsx';
 import { sectionChoice } from './section-choice.ts';
 import { TemperatureField } from './temperature-field.tsx';
-import { useElementWidth } from './use-element-width.ts';
 import { useStudy } from './use-study.ts';
 import { useTemperatureInAddress } from './use-temperature-in-address.ts';
 
@@ -53,11 +53,12 @@ const toleranceWords = ({ toleranceWt, compositionWt }: AlloyRevision): string =
 };
 
 const FreezingAside = ({ queries, range, studio }: Omit<ComputedViewProps, 'revision'>) => {
-  const [measure, width] = useElementWidth(430);
+  const box = useRef<HTMLDivElement>(null);
+  const width = useWidth(box, 430);
   const study = queries.freezing.data;
   return (
     <Panel title="How it freezes">
-      <div ref={measure}>
+      <div ref={box}>
         {study === undefined ? (
           <Spinner label="Computing the freezing curve" />
         ) : study.withinModel ? (

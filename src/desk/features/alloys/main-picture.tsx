@@ -1,14 +1,15 @@
 import type { UseQueryResult } from '@tanstack/react-query';
+import { useRef } from 'react';
 import type { MeltingRange, Outcome, RangeBand } from '#shared/metallurgy/index.ts';
 import { Notice } from '#src/ui/notice.tsx';
 import { Progress } from '#src/ui/progress.tsx';
 import type { StudioWriting } from '../../parts/use-studio.ts';
+import { useWidth } from '../../parts/use-width.ts';
 import type { FreezingStudy, SectionStudy } from './alloy-study.ts';
 import { FreezingPicture } from './freezing-picture.tsx';
 import { SectionTable } from './picture-tables.tsx';
 import type { SectionChoice } from './section-choice.ts';
 import { SectionPicture } from './section-picture.tsx';
-import { useElementWidth } from './use-element-width.ts';
 import type { TemperatureInAddress } from './use-temperature-in-address.ts';
 
 /** What the page computes beside itself, each when it is ready. */
@@ -81,12 +82,13 @@ const NoSection = ({
 /** The page's main picture: the section where one applies, else the freezing curve with the reason why there is none. */
 export const MainPicture = (props: MainPictureProps) => {
   const { choice, range, toleranceWt, queries, temperature, studio, spoken } = props;
-  const [measure, width] = useElementWidth(firstWidth);
+  const box = useRef<HTMLDivElement>(null);
+  const width = useWidth(box, firstWidth);
   const study = resultOf(queries.section);
   const refusal = queries.section.data?.withinModel === false ? queries.section.data.reason : null;
   const why = choice.request === null ? choice.whyNone : refusal;
   return (
-    <div ref={measure}>
+    <div ref={box}>
       {queries.section.error ? (
         <Notice kind="error" title={queries.section.error.message} />
       ) : why !== null ? (
