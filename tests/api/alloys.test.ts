@@ -1,6 +1,8 @@
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import type { Alloy, AlloyRevision, CreateAlloyRequest } from '#shared/contracts/alloy.ts';
 import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
+import { buildCasting } from '#tests/factories/build-casting.ts';
+import { buildMelt } from '#tests/factories/build-melt.ts';
 import { bodyOf } from '#tests/support/body-of.ts';
 import { problemIdOf, sentenceOf } from '#tests/support/problem-id.ts';
 import { startTestServer, type Client, type TestServer } from '#tests/support/test-server.ts';
@@ -204,5 +206,25 @@ describe('an alloy’s numbers', () => {
     const { name } = await create();
     const response = await owner.post('/api/alloys').send({ ...sterling(), name: name.toUpperCase() });
     expect([response.status, problemIdOf(response)]).toEqual([409, 'already-exists']);
+  });
+});
+
+describe('a newly approved revision', () => {
+  it('takes along castings planned on the one before, but not one whose card is open', async () => {
+    const first = await buildAlloyRevision(server.services);
+    const planned = await buildCasting(server.services, { alloyRevisionId: first.id });
+    const opened = await buildCasting(server.services, { alloyRevisionId: first.id });
+    await buildMelt(server.services, { castingId: opened.id });
+    const revised = await owner
+      .post(`/api/alloys/${first.alloyId}/revisions`)
+      .send({ compositionWt: { Ag: 93, Cu: 7 }, fineness: 925, quench: first.quench })
+      .expect(201);
+    const second = newest(revised.body as Alloy);
+    await step(owner, second, 'check').expect(200);
+    await step(owner, second, 'approve').expect(200);
+    await planned.reload();
+    expect(planned.alloyRevisionId).toBe(second.id);
+    await opened.reload();
+    expect(opened.alloyRevisionId).toBe(first.id);
   });
 });
