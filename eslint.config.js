@@ -24,6 +24,13 @@ const pure = [
   'shared is pure: no React, Express, Sequelize, Node or browser globals.',
 ];
 
+const noTerminal = [['#kiosk/*'], 'The desk and the terminal never meet.'];
+const noDesk = [['#src/desk/*'], 'The desk and the terminal never meet.'];
+const ownFeature = [
+  ['../*', '#src/desk/features/*', '#kiosk/features/*'],
+  'Features never import one another: what two of them need lives in parts or lib.',
+];
+
 export default tseslint.config(
   { ignores: ['dist/', 'node_modules/', 'data/', 'screens/'] },
   js.configs.recommended,
@@ -77,6 +84,8 @@ export default tseslint.config(
     ['#kiosk/*', '#src/desk/*'],
     'Shared browser code knows neither application.',
   ]),
-  layer(['src/desk/**'], noServer, noTests, [['#kiosk/*'], 'The desk and the terminal never meet.']),
-  layer(['kiosk/**'], noServer, noTests, [['#src/desk/*'], 'The desk and the terminal never meet.']),
+  layer(['src/desk/**'], noServer, noTests, noTerminal),
+  layer(['src/desk/features/**'], noServer, noTests, noTerminal, ownFeature),
+  layer(['kiosk/**'], noServer, noTests, noDesk),
+  layer(['kiosk/features/**'], noServer, noTests, noDesk, ownFeature),
 );

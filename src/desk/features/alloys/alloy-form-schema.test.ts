@@ -1,9 +1,9 @@
 import { describe, expect, it } from 'vitest';
 import { createAlloyRequest } from '#shared/contracts/alloy.ts';
 import { alloyFormSchema } from './alloy-form-schema.ts';
-import { emptyAlloyForm, type AlloyFormValues } from './alloy-form-values.ts';
-import { sumOfParts, sumSentence } from './composition-fields.tsx';
-import { formPathOf } from './read-alloy-form.ts';
+import { emptyAlloyForm, type AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
+import { sumOfParts, sumSentence } from '#src/desk/parts/composition-fields.tsx';
+import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
 
 const sterling: AlloyFormValues = {
   ...emptyAlloyForm,

@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { TemperatureUnit } from '#shared/lib/units.ts';
-import type { AlloyFormValues } from './alloy-form-values.ts';
-import { formPathOf, readAlloyForm } from './read-alloy-form.ts';
+import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
+import { formPathOf, readAlloyForm } from '#src/desk/parts/read-alloy-form.ts';
 
 const sentence = ({ message, code }: { readonly message: string; readonly code: string }): string =>
   code === 'invalid_value' ? 'Choose one.' : message;

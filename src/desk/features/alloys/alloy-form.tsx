@@ -6,16 +6,16 @@ import { ProblemError } from '#src/lib/http.ts';
 import { Button } from '#src/ui/button.tsx';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { alloyFormSchema } from './alloy-form-schema.ts';
-import type { AlloyFormValues, PartValues } from './alloy-form-values.ts';
-import { CompositionFields } from './composition-fields.tsx';
+import type { AlloyFormValues, PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
 import { LiveFigures } from './live-figures.tsx';
 import { MeasuredFields } from './measured-fields.tsx';
 import { QuenchFields } from './quench-fields.tsx';
-import { formPathOf } from './read-alloy-form.ts';
+import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
 
 /** Props of {@link AlloyForm}. */
 export interface AlloyFormProps<Request> {

@@ -6,10 +6,10 @@ import { AlloyChip } from '#src/ui/alloy-chip.tsx';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
-import { useSortingInAddress } from '../../parts/use-sorting-in-address.ts';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
-import { approvedRevision, openRevision } from './choose-revision.ts';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import { useSortingInAddress } from '#src/desk/parts/use-sorting-in-address.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { approvedRevision, openRevision } from '#src/desk/parts/choose-revision.ts';
 import { RevisionStatusMark } from './revision-status.tsx';
 
 interface AlloyRow {

@@ -3,8 +3,8 @@ import { Link, useSearchParams } from 'react-router-dom';
 import { alloysQuery } from '#src/api/alloys.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { useDeskSession } from '../../parts/desk-session.ts';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { useDeskSession } from '#src/desk/parts/desk-session.ts';
 import { AlloyTable } from './alloy-table.tsx';
 import { NewAlloyForm } from './new-alloy-form.tsx';
 

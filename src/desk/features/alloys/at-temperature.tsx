@@ -1,9 +1,9 @@
 import type { EquilibriumState, Outcome } from '#shared/metallurgy/index.ts';
 import { formatPercent } from '#shared/lib/units.ts';
 import { Notice } from '#src/ui/notice.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { beamOfState } from './beam-of-state.ts';
-import { capitalised } from './element-names.ts';
+import { capitalised } from '#src/desk/parts/element-names.ts';
 import { PhaseBeam } from './phase-beam.tsx';
 import { writeDegrees } from './snap-temperature.ts';
 import { freedomSentence, phasesSentence, phaseWords } from './phase-words.ts';

@@ -1,5 +1,5 @@
 import type { ByElement, EquilibriumState, Phase } from '#shared/metallurgy/index.ts';
-import { elementName } from './element-names.ts';
+import { elementName } from '#src/desk/parts/element-names.ts';
 import { phaseWords } from './phase-words.ts';
 
 /** One weight of the beam: what it is, its share of the mass, and its content of the balancing element in wt%. */

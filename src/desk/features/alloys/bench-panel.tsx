@@ -7,8 +7,8 @@ import {
   type BenchWindow,
 } from '#shared/metallurgy/index.ts';
 import { FigureBasis } from '#src/ui/figure-basis.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
-import { Panel } from './panel.tsx';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
 
 const pages = {
   ceiling:

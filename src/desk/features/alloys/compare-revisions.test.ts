@@ -2,7 +2,12 @@ import { describe, expect, it } from 'vitest';
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { figuresOfComposition } from '#shared/domain/alloy/figures-of-composition.ts';
 import { formatTemperature } from '#shared/lib/units.ts';
-import { approvedRevision, chooseRevision, openRevision, revisionBefore } from './choose-revision.ts';
+import {
+  approvedRevision,
+  chooseRevision,
+  openRevision,
+  revisionBefore,
+} from '#src/desk/parts/choose-revision.ts';
 import { compareRevisions } from './compare-revisions.ts';
 
 const revisionOf = (number: number, compositionWt: Readonly<Record<string, number>>): AlloyRevision => {

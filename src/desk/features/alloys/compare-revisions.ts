@@ -1,7 +1,7 @@
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { fromCelsiusDifference, type TemperatureUnit } from '#shared/lib/units.ts';
-import { capitalised, elementName, writeWt } from './element-names.ts';
-import { quenchWords } from '../../parts/quench-words.ts';
+import { capitalised, elementName, writeWt } from '#src/desk/parts/element-names.ts';
+import { quenchWords } from '#src/desk/parts/quench-words.ts';
 
 /** One thing compared between two revisions; `change` says the difference in words with its sign, or that there is none. */
 export interface ComparedRow {

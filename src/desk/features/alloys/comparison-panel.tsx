@@ -1,8 +1,8 @@
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { compareRevisions } from './compare-revisions.ts';
-import { Panel } from './panel.tsx';
-import { PlainTable } from './plain-table.tsx';
+import { Panel } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 
 /** A revision beside the one before it; what differs says so in words and with its sign. */
 export const ComparisonPanel = ({

@@ -2,8 +2,8 @@ import { useMemo } from 'react';
 import type { AlloyFigures } from '#shared/domain/alloy/alloy-figures.ts';
 import { density, type Density, type Outcome } from '#shared/metallurgy/index.ts';
 import { FigureBasis, type Basis } from '#src/ui/figure-basis.tsx';
-import { writeComposition } from './element-names.ts';
-import { Panel } from './panel.tsx';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
 
 const computedBasis = (answer: Density, composition: string): Basis => ({
   rule: answer.basis,

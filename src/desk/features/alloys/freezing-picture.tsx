@@ -2,7 +2,7 @@ import { useMemo } from 'react';
 import type { MeltingRange } from '#shared/metallurgy/index.ts';
 import { FreezingCurve, freezingFrame, freezingScales } from '#src/ui/freezing-curve.tsx';
 import { handleRoom } from '#src/ui/section-diagram-frame.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import type { FreezingStudy } from './alloy-study.ts';
 import { temperatureTicks } from './axis-ticks.ts';
 import { lastAtOnce, solidShareAt } from './freezing-readings.ts';

@@ -2,7 +2,7 @@ import { useFormContext, useWatch } from 'react-hook-form';
 import type { TemperatureUnit } from '#shared/lib/units.ts';
 import { CheckField } from '#src/ui/check-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import type { AlloyFormValues } from './alloy-form-values.ts';
+import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
 
 /** A measured range with its source, for an alloy that the phase model does not hold. */
 export const MeasuredFields = ({ unit }: { readonly unit: TemperatureUnit }) => {

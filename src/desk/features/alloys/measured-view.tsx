@@ -1,7 +1,7 @@
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { Notice } from '#src/ui/notice.tsx';
 import { TemperatureColumn } from '#src/ui/temperature-column.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { MeltingRows } from './melting-rows.tsx';
 
 const roomC = 60;

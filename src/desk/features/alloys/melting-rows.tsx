@@ -1,7 +1,7 @@
 import type { AlloyFigures } from '#shared/domain/alloy/alloy-figures.ts';
 import type { Band, RangeBand } from '#shared/metallurgy/index.ts';
 import { formatPercent } from '#shared/lib/units.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 
 /** Props of {@link MeltingRows}. */
 export interface MeltingRowsProps {

@@ -5,7 +5,7 @@ import { MemoryRouter } from 'react-router-dom';
 import { afterEach, describe, expect, it, vi } from 'vitest';
 import type { Problem } from '#shared/contracts/problem.ts';
 import { createQueryClient } from '#src/lib/query-client.ts';
-import { DeskSessionContext, type DeskSession } from '../../parts/desk-session.ts';
+import { DeskSessionContext, type DeskSession } from '#src/desk/parts/desk-session.ts';
 import { NewAlloyForm } from './new-alloy-form.tsx';
 
 const session = {

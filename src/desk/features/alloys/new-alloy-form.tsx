@@ -8,8 +8,8 @@ import { PageTitle } from '#src/ui/page-title.tsx';
 import { SelectField } from '#src/ui/select-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
 import { AlloyForm } from './alloy-form.tsx';
-import { emptyAlloyForm, type AlloyFormValues } from './alloy-form-values.ts';
-import { capitalised } from './element-names.ts';
+import { emptyAlloyForm, type AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
+import { capitalised } from '#src/desk/parts/element-names.ts';
 
 const families = alloyFamilies.map((family) => ({
   value: family,

@@ -4,9 +4,9 @@ import { createRevisionRequest, type Alloy, type AlloyRevision } from '#shared/c
 import { useCreateRevision } from '#src/api/alloys.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { AlloyForm } from './alloy-form.tsx';
-import { formOfRevision } from './alloy-form-values.ts';
+import { formOfRevision } from '#src/desk/parts/alloy-form-values.ts';
 
 /** Drafts the next revision of an alloy, filled in from the one shown. */
 export const NewRevisionForm = ({ alloy, from }: { readonly alloy: Alloy; readonly from: AlloyRevision }) => {

@@ -1,5 +1,5 @@
 import type { EquilibriumState, Phase } from '#shared/metallurgy/index.ts';
-import { capitalised, elementName } from './element-names.ts';
+import { capitalised, elementName } from '#src/desk/parts/element-names.ts';
 
 const richest = (wt: Phase['wt']): string =>
   Object.entries(wt).reduce((best, part) => (part[1] > best[1] ? part : best))[0];

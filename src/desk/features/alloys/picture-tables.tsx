@@ -1,11 +1,11 @@
 import { formatPercent } from '#shared/lib/units.ts';
 import type { Section } from '#shared/metallurgy/index.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import type { FreezingStudy } from './alloy-study.ts';
-import { capitalised, elementName, writeWt } from './element-names.ts';
+import { capitalised, elementName, writeWt } from '#src/desk/parts/element-names.ts';
 import { freezingRows } from './freezing-readings.ts';
-import { Disclosure } from './panel.tsx';
-import { PlainTable } from './plain-table.tsx';
+import { Disclosure } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 
 /** The freezing curves in figures. */
 export const FreezingTable = ({

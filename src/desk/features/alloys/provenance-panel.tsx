@@ -1,7 +1,7 @@
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { ENGINE_VERSION, PROVENANCE, type ParameterSource } from '#shared/metallurgy/index.ts';
-import { Disclosure, Panel } from './panel.tsx';
-import { PlainTable } from './plain-table.tsx';
+import { Disclosure, Panel } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 
 const figureRules = [
   [

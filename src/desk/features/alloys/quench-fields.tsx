@@ -2,7 +2,7 @@ import { useFormContext } from 'react-hook-form';
 import { SelectField } from '#src/ui/select-field.tsx';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import type { AlloyFormValues } from './alloy-form-values.ts';
+import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
 
 const media = [
   { value: 'water', label: 'Water' },

@@ -2,8 +2,8 @@ import { useMemo } from 'react';
 import type { QuenchRule } from '#shared/domain/alloy/quench-rule.ts';
 import { ordering } from '#shared/metallurgy/index.ts';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { Panel } from './panel.tsx';
-import { quenchWords } from '../../parts/quench-words.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
+import { quenchWords } from '#src/desk/parts/quench-words.ts';
 
 /** When to quench and why, and whether the metal orders when it cools slowly. */
 export const QuenchPanel = ({

@@ -8,9 +8,9 @@ import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { HoldButton } from '#src/ui/hold-button.tsx';
 import { Notice } from '#src/ui/notice.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
-import { approvedRevision } from './choose-revision.ts';
-import { writeComposition } from './element-names.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { approvedRevision } from '#src/desk/parts/choose-revision.ts';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
 
 /** Props of {@link RevisionActions}. */
 export interface RevisionActionsProps {

@@ -2,7 +2,7 @@ import { Link } from 'react-router-dom';
 import type { Alloy, AlloyRevision } from '#shared/contracts/alloy.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { Notice } from '#src/ui/notice.tsx';
-import { openRevision } from './choose-revision.ts';
+import { openRevision } from '#src/desk/parts/choose-revision.ts';
 
 const DriftNotice = ({ alloy, revision }: { readonly alloy: Alloy; readonly revision: AlloyRevision }) => (
   <Notice

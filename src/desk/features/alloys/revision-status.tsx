@@ -1,6 +1,6 @@
 import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import { StateMark, type State } from '#src/ui/state-mark.tsx';
-import type { StudioClock } from '../../parts/studio-clock.ts';
+import type { StudioClock } from '#src/desk/parts/studio-clock.ts';
 
 const marks: Readonly<Record<AlloyRevision['status'], { readonly state: State; readonly words: string }>> = {
   draft: { state: 'wait', words: 'draft' },

@@ -1,9 +1,9 @@
 import { Link } from 'react-router-dom';
 import type { Alloy, AlloyRevision } from '#shared/contracts/alloy.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
-import { writeComposition } from './element-names.ts';
-import { Panel } from './panel.tsx';
-import { PlainTable } from './plain-table.tsx';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 import { RevisionStatusMark } from './revision-status.tsx';
 
 /** Props of {@link RevisionsPanel}. */

@@ -1,6 +1,6 @@
 import type { Section, SectionInvariant, SectionPoint } from '#shared/metallurgy/index.ts';
 import type { DiagramField, DiagramLine } from '#src/ui/section-diagram.tsx';
-import { elementName } from './element-names.ts';
+import { elementName } from '#src/desk/parts/element-names.ts';
 import type { SectionStudy } from './alloy-study.ts';
 
 /** A section's fields and lines, in wt% and °C, for the diagram to draw; later fields lie over earlier ones. */

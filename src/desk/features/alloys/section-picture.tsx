@@ -10,10 +10,10 @@ import {
 import { labelPlaces } from '#src/ui/section-diagram-labels.ts';
 import { SectionTieLine } from '#src/ui/section-diagram-tie-line.tsx';
 import { SectionDiagram, type DiagramNote } from '#src/ui/section-diagram.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import type { SectionStudy } from './alloy-study.ts';
 import { temperatureTicks, wtTicks } from './axis-ticks.ts';
-import { capitalised, elementName, writeWt } from './element-names.ts';
+import { capitalised, elementName, writeWt } from '#src/desk/parts/element-names.ts';
 import { sectionDrawing } from './section-drawing.ts';
 import { sectionSentence } from './section-sentence.ts';
 import { sectionSpan } from './temperature-span.ts';

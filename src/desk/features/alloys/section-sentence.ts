@@ -1,5 +1,5 @@
 import type { SectionStudy } from './alloy-study.ts';
-import { elementName, writeWt } from './element-names.ts';
+import { elementName, writeWt } from '#src/desk/parts/element-names.ts';
 
 const titleOf = ({ section: { request } }: SectionStudy): string =>
   request.kind === 'carat'

@@ -3,7 +3,7 @@ import { parseDecimal } from '#shared/lib/decimal.ts';
 import { toCelsius } from '#shared/lib/units.ts';
 import { Button } from '#src/ui/button.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { writeDegrees } from './snap-temperature.ts';
 import type { TemperatureInAddress } from './use-temperature-in-address.ts';
 

@@ -1,5 +1,5 @@
 import { useRef, type KeyboardEvent, type PointerEvent, type ReactNode } from 'react';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { snapTemperature, temperatureAfterKey, writeDegrees } from './snap-temperature.ts';
 import type { TemperatureSpan } from './temperature-span.ts';
 import type { TemperatureInAddress } from './use-temperature-in-address.ts';

@@ -2,10 +2,10 @@ import type { UseQueryResult } from '@tanstack/react-query';
 import { fromCelsiusDifference } from '#shared/lib/units.ts';
 import type { Outcome, RangeBand } from '#shared/metallurgy/index.ts';
 import { Spinner } from '#src/ui/spinner.tsx';
-import type { StudioWriting } from '../../parts/use-studio.ts';
-import { capitalised, elementName, writeWt } from './element-names.ts';
-import { Panel } from './panel.tsx';
-import { PlainTable } from './plain-table.tsx';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { capitalised, elementName, writeWt } from '#src/desk/parts/element-names.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 
 /** Props of {@link TolerancePanel}. */
 export interface TolerancePanelProps {

@@ -3,10 +3,10 @@ import type { Casting } from '#shared/contracts/casting.ts';
 import type { Flask } from '#shared/contracts/flask.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { AlloyChip } from '#src/ui/alloy-chip.tsx';
-import { CastingStateMark } from '../../parts/casting-state-mark.tsx';
-import { FlaskCodePicture } from '../../parts/flask-code-picture.tsx';
-import { FlaskCodeText } from '../../parts/flask-code-text.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
+import { CastingStateMark } from '#src/desk/parts/casting-state-mark.tsx';
+import { FlaskCodePicture } from '#src/desk/parts/flask-code-picture.tsx';
+import { FlaskCodeText } from '#src/desk/parts/flask-code-text.tsx';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
 
 /** Props of {@link FlaskTile}. */
 export interface FlaskTileProps {

@@ -7,7 +7,7 @@ import { buttonClass } from '#src/ui/button-class.ts';
 import { Icon } from '#src/ui/icon.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { FlaskTile } from './flask-tile.tsx';
 import { LargeCode } from './large-code.tsx';
 

@@ -1,5 +1,5 @@
 import { Dialog } from '#src/ui/dialog.tsx';
-import { FlaskCodePicture } from '../../parts/flask-code-picture.tsx';
+import { FlaskCodePicture } from '#src/desk/parts/flask-code-picture.tsx';
 
 /** Props of {@link LargeCode}. */
 export interface LargeCodeProps {

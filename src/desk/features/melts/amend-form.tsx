@@ -5,9 +5,9 @@ import { useAmendMelt } from '#src/api/melts.ts';
 import { Button } from '#src/ui/button.tsx';
 import { SelectField } from '#src/ui/select-field.tsx';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { eventWords } from './event-words.ts';
 
 const readSeq = (value: string | number | null): number | null =>

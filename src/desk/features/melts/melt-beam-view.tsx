@@ -3,7 +3,7 @@ import type { Melt } from '#shared/contracts/melt.ts';
 import { formatPercent } from '#shared/lib/units.ts';
 import { cx } from '#src/ui/cx.ts';
 import { MeltBeam } from '#src/ui/melt-beam.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { balanceAt } from './balance-at.ts';
 
 const solidWords = (share: number | null, celsius: number, liquidusC: number, solidusC: number): string => {

@@ -3,9 +3,9 @@ import type { MeltSummary } from '#shared/contracts/melt.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { AlloyChip } from '#src/ui/alloy-chip.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { FlaskCodeText } from '../../parts/flask-code-text.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
-import type { StudioWriting } from '../../parts/use-studio.ts';
+import { FlaskCodeText } from '#src/desk/parts/flask-code-text.tsx';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { MeltStateMark } from './melt-state-mark.tsx';
 
 type Column = ColumnDef<MeltSummary>;

@@ -1,7 +1,7 @@
 import type { Amendment, Melt } from '#shared/contracts/melt.ts';
 import type { MeltEvent } from '#shared/contracts/card.ts';
 import { formatClock } from '#shared/lib/units.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { eventWords, recordedLateS } from './event-words.ts';
 
 /** A remark added later, with who and when. */

@@ -9,9 +9,9 @@ import { Button } from '#src/ui/button.tsx';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { MeltSections } from './melt-sections.tsx';
 import { MeltStateMark } from './melt-state-mark.tsx';
 

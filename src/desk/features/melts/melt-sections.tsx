@@ -1,8 +1,8 @@
 import type { ReactNode } from 'react';
 import type { Melt } from '#shared/contracts/melt.ts';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { CardFiguresList } from '../../parts/card-figures-list.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { CardFiguresList } from '#src/desk/parts/card-figures-list.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { AmendForm } from './amend-form.tsx';
 import { MeltBeamView } from './melt-beam-view.tsx';
 import { AmendmentNote, MeltEvents } from './melt-events.tsx';

@@ -4,9 +4,9 @@ import { Button } from '#src/ui/button.tsx';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { useSortingInAddress } from '../../parts/use-sorting-in-address.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { useSortingInAddress } from '#src/desk/parts/use-sorting-in-address.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { meltColumns } from './melt-columns.tsx';
 
 const noMelt = (

@@ -1,6 +1,6 @@
 import type { Melt } from '#shared/contracts/melt.ts';
 import { chargedG } from '#shared/domain/pour-card/card-state.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 
 interface Part {
   readonly name: string;

@@ -2,8 +2,8 @@ import type { Melt } from '#shared/contracts/melt.ts';
 import { secondsBetween } from '#shared/domain/pour-card/apply-event.ts';
 import { formatClock } from '#shared/lib/units.ts';
 import { DefinitionList, type Definition } from '#src/ui/definition-list.tsx';
-import { quenchWords } from '../../parts/quench-words.ts';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
+import { quenchWords } from '#src/desk/parts/quench-words.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 
 const pourRows = ({ state, context }: Melt, { clock, temperature }: StudioWriting): readonly Definition[] => {
   const { pour } = state;

@@ -2,8 +2,8 @@ import { useId, useRef } from 'react';
 import type { Melt } from '#shared/contracts/melt.ts';
 import { PhasePatterns } from '#src/ui/phase-patterns.tsx';
 import { spreadLabels } from '#src/ui/spread-labels.ts';
-import { useStudio } from '../../parts/use-studio.ts';
-import { useWidth } from '../../parts/use-width.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { useWidth } from '#src/desk/parts/use-width.ts';
 import { chartScales, type ChartScales, type PlotFrame } from './chart-scales.ts';
 
 const height = 520;

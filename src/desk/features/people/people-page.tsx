@@ -9,8 +9,8 @@ import { Icon } from '#src/ui/icon.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { useSortingInAddress } from '../../parts/use-sorting-in-address.ts';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { useSortingInAddress } from '#src/desk/parts/use-sorting-in-address.ts';
 import { UnlockButton } from './unlock-button.tsx';
 
 const pinWords = ({ hasPin, pinLocked }: Person): string => (pinLocked ? 'locked' : hasPin ? 'set' : 'none');

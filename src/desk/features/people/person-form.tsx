@@ -9,8 +9,8 @@ import { buttonClass } from '#src/ui/button-class.ts';
 import { CheckField } from '#src/ui/check-field.tsx';
 import { FieldError } from '#src/ui/field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import type { PersonValues } from './person-values.ts';
 import { roleWords } from './role-words.ts';
 

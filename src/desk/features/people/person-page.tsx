@@ -5,7 +5,7 @@ import { peopleQuery, useUpdatePerson } from '#src/api/people.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { PersonForm } from './person-form.tsx';
 import { changedPersonForm, valuesOf } from './person-values.ts';
 import { UnlockButton } from './unlock-button.tsx';

@@ -3,9 +3,9 @@ import { useParams } from 'react-router-dom';
 import { parseFlaskCode } from '#shared/lib/codes.ts';
 import { flasksQuery } from '#src/api/castings.ts';
 import { Notice } from '#src/ui/notice.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { FlaskPlate } from './flask-plate.tsx';
-import { PrintFrame } from './print-frame.tsx';
+import { PrintFrame } from '#src/desk/parts/print-frame.tsx';
 
 const advice =
   'The plate is 40 × 40 mm; each module of its code is 1 mm. Print at 100 %, not fitted to the page, and scan it once before it is engraved.';

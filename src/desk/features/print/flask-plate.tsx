@@ -1,5 +1,5 @@
 import { splitCode } from '#shared/lib/codes.ts';
-import { FlaskCodePicture } from '../../parts/flask-code-picture.tsx';
+import { FlaskCodePicture } from '#src/desk/parts/flask-code-picture.tsx';
 
 /** A plate of exactly 40 × 40 mm for engraving: the code in modules of 1 mm with its quiet zone, and its number to read. */
 export const FlaskPlate = ({ code }: { readonly code: string }) => {

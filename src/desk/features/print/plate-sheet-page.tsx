@@ -1,8 +1,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { flasksQuery } from '#src/api/castings.ts';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { FlaskPlate } from './flask-plate.tsx';
-import { PrintFrame } from './print-frame.tsx';
+import { PrintFrame } from '#src/desk/parts/print-frame.tsx';
 
 const advice =
   'Four plates across on A4, each 40 × 40 mm between its cutting lines. Print at 100 %, not fitted to the page.';

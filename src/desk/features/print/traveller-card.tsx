@@ -3,10 +3,10 @@ import { castingMethodNames } from '#shared/domain/casting/casting-method.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { formatClock } from '#shared/lib/units.ts';
 import { useNow } from '#src/lib/use-now.ts';
-import { FlaskCodePicture } from '../../parts/flask-code-picture.tsx';
-import { quenchWords } from '../../parts/quench-words.ts';
-import { useCastingFigures, type CastingFigures } from '../../parts/use-casting-figures.ts';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
+import { FlaskCodePicture } from '#src/desk/parts/flask-code-picture.tsx';
+import { quenchWords } from '#src/desk/parts/quench-words.ts';
+import { useCastingFigures, type CastingFigures } from '#src/desk/parts/use-casting-figures.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 
 interface Row {
   readonly term: string;

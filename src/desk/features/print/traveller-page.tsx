@@ -2,8 +2,8 @@ import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
 import { castingsQuery } from '#src/api/castings.ts';
 import { Notice } from '#src/ui/notice.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { PrintFrame } from './print-frame.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { PrintFrame } from '#src/desk/parts/print-frame.tsx';
 import { TravellerCard } from './traveller-card.tsx';
 
 const advice =

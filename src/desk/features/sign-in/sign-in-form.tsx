@@ -4,8 +4,8 @@ import { signInRequest, type SignInRequest } from '#shared/contracts/session.ts'
 import { useSignIn } from '#src/api/session.ts';
 import { Button } from '#src/ui/button.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import { useWait, waitOf } from './use-wait.ts';
 
 /** Name and password; what was typed stays after a refusal, and the wait after several is counted down. */

@@ -5,7 +5,7 @@ import { useForm, type Path } from 'react-hook-form';
 import type { Studio, UpdateStudioRequest } from '#shared/contracts/studio.ts';
 import { studioQuery, useUpdateStudio } from '#src/api/studio.ts';
 import { isProblemError } from '#src/lib/http.ts';
-import { applyProblem } from '../../parts/apply-problem.ts';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
 import { countFaults } from './count-faults.ts';
 import { SaveBar } from './save-bar.tsx';
 import { StudioFields } from './studio-fields.tsx';

@@ -1,7 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { studioQuery } from '#src/api/studio.ts';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { StudioForm } from './studio-form.tsx';
 
 /** The studio's settings: every card is computed from them. */

@@ -4,8 +4,8 @@ import { createEnrolmentRequest, type CreateEnrolmentRequest } from '#shared/con
 import { useCreateEnrolment } from '#src/api/terminals.ts';
 import { Button } from '#src/ui/button.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import { EnrolmentCode } from './enrolment-code.tsx';
 
 /** Makes a one-time code with which a device becomes a terminal, and shows it large. */

@@ -4,7 +4,7 @@ import { useRevokeTerminal } from '#src/api/terminals.ts';
 import { sentenceOf } from '#src/lib/http.ts';
 import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 
 /** Ends a terminal, after asking. */
 export const RevokeTerminal = ({ terminal }: { readonly terminal: Terminal }) => {

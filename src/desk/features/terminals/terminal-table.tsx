@@ -3,7 +3,7 @@ import type { Terminal } from '#shared/contracts/terminal.ts';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { RevokeTerminal } from './revoke-terminal.tsx';
 
 const columnsFor = ({ clock }: StudioWriting): readonly ColumnDef<Terminal>[] => [

@@ -2,7 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { terminalsQuery } from '#src/api/terminals.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { EnrolmentForm } from './enrolment-form.tsx';
 import { TerminalTable } from './terminal-table.tsx';
 

@@ -4,7 +4,7 @@ import { castingStatesByHand, needsReason, type CastingState } from '#shared/dom
 import { useMoveCasting } from '#src/api/castings.ts';
 import { sentenceOf } from '#src/lib/http.ts';
 import { Button } from '#src/ui/button.tsx';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import { moveWords } from './move-words.ts';
 import { ReasonDialog } from './reason-dialog.tsx';
 

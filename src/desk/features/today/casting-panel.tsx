@@ -6,11 +6,11 @@ import { splitCode } from '#shared/lib/codes.ts';
 import { AlloyChip } from '#src/ui/alloy-chip.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { CardFiguresList } from '../../parts/card-figures-list.tsx';
-import { CastingStateMark } from '../../parts/casting-state-mark.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
-import { useCastingFigures } from '../../parts/use-casting-figures.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { CardFiguresList } from '#src/desk/parts/card-figures-list.tsx';
+import { CastingStateMark } from '#src/desk/parts/casting-state-mark.tsx';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import { useCastingFigures } from '#src/desk/parts/use-casting-figures.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { CastingMoves } from './casting-moves.tsx';
 
 const link = 'rounded-md font-extrabold underline decoration-2 underline-offset-4';

@@ -1,4 +1,4 @@
-import type { StudioClock } from '../../parts/studio-clock.ts';
+import type { StudioClock } from '#src/desk/parts/studio-clock.ts';
 import { sizes, type DayLayout, type PlacedBay } from './day-layout.ts';
 import { isToPour } from './day-sentence.ts';
 import { SmallFlask } from './small-flask.tsx';

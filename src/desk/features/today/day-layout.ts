@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import type { Casting } from '#shared/contracts/casting.ts';
-import type { StudioClock } from '../../parts/studio-clock.ts';
+import type { StudioClock } from '#src/desk/parts/studio-clock.ts';
 import { hoursOfDay } from './hours-of-day.ts';
 import { placeDrops, type BayOfDrops } from './place-drops.ts';
 import type { Day } from './use-day.ts';

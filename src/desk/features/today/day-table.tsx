@@ -6,10 +6,10 @@ import { splitCode } from '#shared/lib/codes.ts';
 import { AlloyChip } from '#src/ui/alloy-chip.tsx';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { CastingStateMark } from '../../parts/casting-state-mark.tsx';
-import { FlaskCodeText } from '../../parts/flask-code-text.tsx';
-import { metalOf } from '../../parts/metal-of.ts';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
+import { CastingStateMark } from '#src/desk/parts/casting-state-mark.tsx';
+import { FlaskCodeText } from '#src/desk/parts/flask-code-text.tsx';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 import type { Day } from './use-day.ts';
 
 const columnsFor = ({ runningIds }: Day, { clock, mass }: StudioWriting): readonly ColumnDef<Casting>[] => [

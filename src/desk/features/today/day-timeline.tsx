@@ -3,14 +3,14 @@ import type { Casting } from '#shared/contracts/casting.ts';
 import { describeCastingState } from '#shared/domain/casting/casting-state.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { cx } from '#src/ui/cx.ts';
-import { metalOf } from '../../parts/metal-of.ts';
-import { useStudio } from '../../parts/use-studio.ts';
+import { metalOf } from '#src/desk/parts/metal-of.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { DayGround } from './day-ground.tsx';
 import { layOutDay, sizes } from './day-layout.ts';
 import { isPoured, isToPour } from './day-sentence.ts';
 import { DropShape, type DropLook } from './drop-shape.tsx';
 import type { Day } from './use-day.ts';
-import { useWidth } from '../../parts/use-width.ts';
+import { useWidth } from '#src/desk/parts/use-width.ts';
 
 /** Props of {@link DayTimeline}. */
 export interface DayTimelineProps {

@@ -8,8 +8,8 @@ import { useMoveCasting } from '#src/api/castings.ts';
 import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 
 /** Props of {@link ReasonDialog}. */
 export interface ReasonDialogProps {
