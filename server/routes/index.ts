@@ -4,6 +4,8 @@ import { castingRoutes } from './castings.ts';
 import type { Route } from './define-route.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
+import { ledgerRoutes } from './ledger.ts';
+import { lotRoutes } from './lots.ts';
 import { meltRoutes } from './melts.ts';
 import { peopleRoutes } from './people.ts';
 import { sessionRoutes } from './sessions.ts';
@@ -22,4 +24,6 @@ export const routes: readonly Route[] = [
   ...castingRoutes,
   ...cardRoutes,
   ...meltRoutes,
+  ...lotRoutes,
+  ...ledgerRoutes,
 ];

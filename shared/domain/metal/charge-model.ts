@@ -1,8 +1,10 @@
 import {
   elementsOf,
   leastWeighingMg,
+  massOfLines,
   toleranceOf,
   weighingStepMg,
+  type ChargeLine,
   type ChargeRequest,
 } from './charge-request.ts';
 import { lowestPart, mayBeCharged, type LotKind, type LotOnHand } from './lot.ts';
@@ -25,15 +27,24 @@ export interface ModelRow {
 /** A charge as a mixed-integer programme: grams of each lot, and whether it is used. */
 export interface ChargeModel {
   readonly lots: readonly LotOnHand[];
+  /** What is still to be weighed, g, and how far that may be above and below. */
   readonly wantedG: number;
+  readonly overG: number;
+  readonly underG: number;
   /** The most that can be taken of each lot, g. */
   readonly mostG: readonly number[];
   readonly rows: readonly ModelRow[];
   /** What a gram of each lot costs in the plan's order of preference; unitless. */
   readonly costPerG: readonly number[];
-  /** What using one more lot costs, in the same. */
-  readonly costPerLot: number;
+  /** What using each lot at all costs, in the same. */
+  readonly costPerLot: readonly number[];
 }
+
+/** What a gram beyond, or short of, the wanted mass costs: more than any gram of metal on hand. */
+export const costOffG = 10;
+
+/** What a gram of metal that would have to be bought costs: more than any way to do without. */
+const costBought = 100;
 
 /** Returns first, then grain and master alloy, fine metal last. */
 const preference: Readonly<Record<LotKind, number>> = {
@@ -44,6 +55,9 @@ const preference: Readonly<Record<LotKind, number>> = {
   scrap: 0,
 };
 
+/** What using one more lot costs, as a share of the whole. */
+const lotShare = 0.02;
+
 /** Lots of a plan that rounding to weighable masses may move, each by half a step at most; plans use few. */
 const roundedLots = 8;
 
@@ -52,132 +66,154 @@ const roundingG = (spread: number): number => ((weighingStepMg / 1000) * rounded
 
 const spread = (shares: readonly number[]): number => Math.max(0, ...shares) - Math.min(1, ...shares);
 
-/** The metal wanted, g, and how much of the rounding is kept in hand, as a share. */
 interface Scope {
-  readonly wantedG: number;
+  readonly request: ChargeRequest;
+  readonly lots: readonly LotOnHand[];
+  readonly weighed: readonly ChargeLine[];
+  /** How much of the rounding is kept in hand, as a share. */
   readonly margin: number;
 }
 
-const elementRows = (
-  request: ChargeRequest,
-  lots: readonly LotOnHand[],
-  { wantedG, margin }: Scope,
-): readonly ModelRow[] =>
-  elementsOf({ targetWt: request.targetWt, lots }).flatMap((element): ModelRow[] => {
-    const coefficients = lots.map(({ compositionWt }) => (compositionWt[element] ?? 0) / 100);
-    const targetG = ((request.targetWt[element] ?? 0) / 100) * wantedG;
-    const toleranceG = (toleranceOf(request, element) / 100) * wantedG;
-    const marginG = Math.min(margin * roundingG(spread(coefficients)), toleranceG / 2);
-    return [
-      {
-        name: `${element}_most`,
-        limit: { kind: 'element', element, side: 'most' },
-        coefficients,
-        sense: '<=',
-        bound: targetG + toleranceG - marginG,
-      },
-      {
-        name: `${element}_least`,
-        limit: { kind: 'element', element, side: 'least' },
-        coefficients,
-        sense: '>=',
-        bound: targetG - toleranceG + marginG,
-      },
-    ];
-  });
-
-const finenessRow = (
-  request: ChargeRequest,
-  lots: readonly LotOnHand[],
-  { wantedG, margin }: Scope,
+/** A limit on a share of the whole charge, whatever the whole comes to: Σ (share − limit) · g ≶ 0, crucible included. */
+const shareRow = (
+  { lots, weighed, margin, request }: Scope,
+  {
+    name,
+    limit,
+    sense,
+    atMost,
+    share,
+  }: Pick<ModelRow, 'name' | 'limit' | 'sense'> & {
+    readonly atMost: number;
+    readonly share: (lot: LotOnHand) => number;
+  },
+  roomG = Number.POSITIVE_INFINITY,
 ): ModelRow => {
-  const coefficients = lots.map((lot) => lowestPart(lot, request.markedMetal) / 100);
-  const markG = (request.markPpt / 1000) * wantedG + margin * roundingG(spread(coefficients));
-  return { name: 'fineness', limit: { kind: 'fineness' }, coefficients, sense: '>=', bound: markG };
+  const already = weighed.reduce((sum, { lot, massMg }) => sum + ((share(lot) - atMost) * massMg) / 1000, 0);
+  const shares = lots.map(share);
+  // Half the room is kept, so that a narrow limit does not vanish.
+  const marginG = Math.min(margin * roundingG(spread(shares)), roomG / 2, request.wantedMg / 1000);
+  return {
+    name,
+    limit,
+    sense,
+    coefficients: shares.map((each) => each - atMost),
+    bound: sense === '<=' ? -already - marginG : -already + marginG,
+  };
 };
 
-const returnsRow = (request: ChargeRequest, lots: readonly LotOnHand[], wantedG: number): ModelRow => ({
-  name: 'returns',
-  limit: { kind: 'returns' },
-  coefficients: lots.map(({ kind }) => (kind === 'returns' ? 1 : 0)),
-  sense: '<=',
-  bound: Math.floor((request.returnsShare * wantedG * 1000) / weighingStepMg) * (weighingStepMg / 1000),
-});
+const elementRows = (scope: Scope): readonly ModelRow[] => {
+  const { request } = scope;
+  return elementsOf(request).flatMap((element): ModelRow[] => {
+    const target = request.targetWt[element] ?? 0;
+    const tolerance = toleranceOf(request, element);
+    const roomG = (tolerance / 100) * (request.wantedMg / 1000);
+    const share = ({ compositionWt }: LotOnHand): number => (compositionWt[element] ?? 0) / 100;
+    const row = (side: 'most' | 'least'): ModelRow =>
+      shareRow(
+        scope,
+        {
+          name: `${element}_${side}`,
+          limit: { kind: 'element', element, side },
+          sense: side === 'most' ? '<=' : '>=',
+          atMost: (side === 'most' ? target + tolerance : target - tolerance) / 100,
+          share,
+        },
+        roomG,
+      );
+    return [row('most'), row('least')];
+  });
+};
+
+const finenessRow = (scope: Scope): ModelRow =>
+  shareRow(scope, {
+    name: 'fineness',
+    limit: { kind: 'fineness' },
+    sense: '>=',
+    atMost: scope.request.markPpt / 1000,
+    share: (lot) => lowestPart(lot, scope.request.markedMetal) / 100,
+  });
+
+const returnsRow = (scope: Scope): ModelRow =>
+  shareRow(
+    scope,
+    {
+      name: 'returns',
+      limit: { kind: 'returns' },
+      sense: '<=',
+      atMost: scope.request.returnsShare,
+      share: ({ kind }) => (kind === 'returns' ? 1 : 0),
+    },
+    // Whole weighings settle it: half a step is all that rounding can add.
+    weighingStepMg / 1000,
+  );
 
 /** Older returns cost less, so that they go first. */
-const costs = (lots: readonly LotOnHand[]): readonly number[] => {
+const costsPerG = (lots: readonly LotOnHand[]): readonly number[] => {
   const byAge = lots
     .filter(({ kind }) => kind === 'returns')
     .map(({ receivedAt }) => receivedAt)
     .sort();
-  return lots.map(({ kind, receivedAt }) => {
+  return lots.map(({ kind, receivedAt, isBought }) => {
     const age = kind === 'returns' ? byAge.indexOf(receivedAt) / Math.max(1, byAge.length) : 0;
-    return preference[kind] + 0.5 * age;
+    return preference[kind] + 0.5 * age + (isBought ? costBought : 0);
   });
 };
+
+const wholeStepsG = (mg: number): number => (Math.floor(mg / weighingStepMg) * weighingStepMg) / 1000;
 
 /**
  * Builds the programme of a charge; lots that may not be charged, or hold less than can be weighed, are left out.
  * `margin` tightens the limits by that share of what rounding to weighable masses could undo.
  */
 export const buildChargeModel = (request: ChargeRequest, { margin = 0 } = {}): ChargeModel => {
-  const wantedG = (Math.round(request.wantedMg / weighingStepMg) * weighingStepMg) / 1000;
+  const { weighed = [], overMg = 0, underMg = 0, wantedMg } = request;
   const lots = request.lots.filter(
     ({ kind, balanceMg }) => mayBeCharged(kind) && balanceMg >= leastWeighingMg,
   );
-  const wholeSteps = (mg: number): number => (Math.floor(mg / weighingStepMg) * weighingStepMg) / 1000;
+  const missingMg = Math.max(0, wantedMg - massOfLines(weighed));
+  const wantedG = (Math.round(missingMg / weighingStepMg) * weighingStepMg) / 1000;
+  const overG = wholeStepsG(Math.max(0, Math.min(overMg, overMg + wantedMg - massOfLines(weighed))));
+  const scope: Scope = { request, lots, weighed, margin };
+  const used = new Set(weighed.map(({ lot }) => lot.id));
   return {
     lots,
     wantedG,
-    mostG: lots.map(({ balanceMg }) => Math.min(wantedG, wholeSteps(balanceMg))),
-    rows: [
-      ...elementRows(request, lots, { wantedG, margin }),
-      finenessRow(request, lots, { wantedG, margin }),
-      returnsRow(request, lots, wantedG),
-    ],
-    costPerG: costs(lots),
-    costPerLot: 0.02 * wantedG,
+    overG,
+    underG: Math.min(wantedG, wholeStepsG(underMg)),
+    mostG: lots.map(({ balanceMg }) => Math.min(wantedG + overG, wholeStepsG(balanceMg))),
+    rows: [...elementRows(scope), finenessRow(scope), returnsRow(scope)],
+    costPerG: costsPerG(lots),
+    costPerLot: lots.map(({ id }) => (used.has(id) ? 0 : (lotShare * wantedMg) / 1000)),
   };
 };
 
-const term = (coefficient: number, variable: string): string =>
-  coefficient === 0 ? '' : ` ${coefficient < 0 ? '-' : '+'} ${Math.abs(coefficient).toFixed(9)} ${variable}`;
+/** What some lines cost in a model's order of preference. */
+export const costOfLines = (
+  { lots, costPerG, costPerLot, wantedG }: ChargeModel,
+  lines: readonly ChargeLine[],
+): number =>
+  lines.reduce(
+    (sum, { lot, massMg }) => {
+      const index = lots.findIndex(({ id }) => id === lot.id);
+      return sum + ((costPerG[index] ?? 0) * massMg) / 1000 + (costPerLot[index] ?? 0);
+    },
+    costOffG * Math.abs(massOfLines(lines) / 1000 - wantedG),
+  );
 
-/** What each limit is widened by in the elastic programme: `over_…` and `under_…` variables, in grams. */
-const slackOf = ({ name, sense }: ModelRow): string => `${sense === '<=' ? '-' : '+'} slack_${name}`;
-
-const rowLine = (row: ModelRow, isElastic: boolean): string =>
-  ` ${row.name}:${row.coefficients.map((coefficient, lot) => term(coefficient, `g${lot}`)).join('')}${isElastic ? ` ${slackOf(row)}` : ''} ${row.sense} ${row.bound.toFixed(9)}`;
-
-/**
- * Writes the programme in the CPLEX LP format. The elastic one lets every limit give way at a price, and so always has a
- * solution while there is metal enough: what gives way is what stands in the way.
- */
-export const writeChargeModel = (model: ChargeModel, { isElastic = false } = {}): string => {
-  const { lots, wantedG, mostG, rows, costPerG, costPerLot } = model;
-  const every = lots.map((_, lot) => lot);
-  const least = leastWeighingMg / 1000;
-  const cost = isElastic
-    ? rows.map(({ name }) => ` + slack_${name}`).join('')
-    : every.map((lot) => term(costPerG[lot] ?? 0, `g${lot}`) + term(costPerLot, `u${lot}`)).join('');
-  return [
-    'Minimize',
-    ` cost:${cost === '' ? ' 0 g0' : cost}`,
-    'Subject To',
-    ` total:${every.map((lot) => ` + g${lot}`).join('')} = ${wantedG.toFixed(3)}`,
-    ...rows
-      .filter(({ coefficients }) => isElastic || coefficients.some((coefficient) => coefficient !== 0))
-      .map((row) => rowLine(row, isElastic)),
-    ...(isElastic
-      ? []
-      : every.flatMap((lot) => [
-          ` most${lot}: g${lot} - ${(mostG[lot] ?? 0).toFixed(3)} u${lot} <= 0`,
-          ` least${lot}: g${lot} - ${least.toFixed(3)} u${lot} >= 0`,
-        ])),
-    'Bounds',
-    ...every.map((lot) => ` 0 <= g${lot} <= ${(mostG[lot] ?? 0).toFixed(3)}`),
-    ...(isElastic ? [] : ['Binary', ` ${every.map((lot) => `u${lot}`).join(' ')}`]),
-    'End',
-    '',
-  ].join('\n');
+/** The same programme with only some of its lots. */
+export const restrictModel = (model: ChargeModel, kept: readonly number[]): ChargeModel => {
+  const pick = <Value>(values: readonly Value[]): readonly Value[] =>
+    kept.flatMap((index) => {
+      const value = values[index];
+      return value === undefined ? [] : [value];
+    });
+  return {
+    ...model,
+    lots: pick(model.lots),
+    mostG: pick(model.mostG),
+    costPerG: pick(model.costPerG),
+    costPerLot: pick(model.costPerLot),
+    rows: model.rows.map((row) => ({ ...row, coefficients: pick(row.coefficients) })),
+  };
 };

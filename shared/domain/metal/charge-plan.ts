@@ -1,58 +1,74 @@
-import type { ChargeRequest } from './charge-request.ts';
-import { elementsOf, toleranceOf, weighingStepMg } from './charge-request.ts';
-import { mixFineness, mixParts, type LotOnHand, type Parts } from './lot.ts';
+import {
+  elementsOf,
+  massOfLines,
+  toleranceOf,
+  weighingStepMg,
+  type ChargeLine,
+  type ChargeRequest,
+} from './charge-request.ts';
+import { mixFineness, mixParts, type Parts } from './lot.ts';
 
-/** One line of a charge plan: how much of which lot, in whole milligrams. */
-export interface ChargeLine {
-  readonly lot: LotOnHand;
-  readonly massMg: number;
-}
-
-/** A charge plan that holds every limit, with what it comes to. */
+/** A charge: what is (still) to be weighed, and what the whole comes to. */
 export interface ChargePlan {
   readonly lines: readonly ChargeLine[];
+  /** The whole charge, crucible included, mg. */
+  readonly totalMg: number;
   readonly partsWt: Parts;
   readonly expectedPpt: number;
   readonly worstPpt: number;
   readonly returnsShare: number;
 }
 
-/** What a set of lines comes to. */
-export const summarise = (lines: readonly ChargeLine[], metal: 'Ag' | 'Au'): ChargePlan => {
-  const weighed = lines.map(({ lot, massMg }) => ({ assay: lot, massMg }));
-  const totalMg = lines.reduce((sum, { massMg }) => sum + massMg, 0);
-  const returnsMg = lines.reduce((sum, { lot, massMg }) => sum + (lot.kind === 'returns' ? massMg : 0), 0);
-  const { expected, worst } = mixFineness(weighed, metal);
+/** What some lines come to, together with what is in the crucible already. */
+export const summarise = (
+  lines: readonly ChargeLine[],
+  metal: 'Ag' | 'Au',
+  weighed: readonly ChargeLine[] = [],
+): ChargePlan => {
+  const all = [...weighed, ...lines];
+  const mixed = all.map(({ lot, massMg }) => ({ assay: lot, massMg }));
+  const totalMg = massOfLines(all);
+  const returnsMg = massOfLines(all.filter(({ lot }) => lot.kind === 'returns'));
+  const { expected, worst } = mixFineness(mixed, metal);
   return {
     lines,
-    partsWt: mixParts(weighed),
+    totalMg,
+    partsWt: mixParts(mixed),
     expectedPpt: expected,
     worstPpt: worst,
     returnsShare: totalMg === 0 ? 0 : returnsMg / totalMg,
   };
 };
 
-/** The faults of a plan against its request, one sentence each; an exact check, independent of the solver. */
-export const faultsOf = (plan: ChargePlan, request: ChargeRequest): readonly string[] => {
-  const totalMg = plan.lines.reduce((sum, { massMg }) => sum + massMg, 0);
-  const faults: string[] = [];
-  if (Math.abs(totalMg - request.wantedMg) > weighingStepMg / 2)
-    faults.push('The masses do not come to the metal wanted.');
-  for (const element of elementsOf(request)) {
-    const off = (plan.partsWt[element] ?? 0) - (request.targetWt[element] ?? 0);
-    if (Math.abs(off) > toleranceOf(request, element) + 1e-9) {
-      faults.push(
-        `${element} would be ${Math.abs(off).toFixed(2)} wt% ${off > 0 ? 'over' : 'under'} the alloy.`,
-      );
-    }
-  }
-  if (plan.worstPpt < request.markPpt - 1e-9) faults.push('The fineness could fall below the mark.');
-  if (plan.returnsShare > request.returnsShare + 1e-9) faults.push('There are too many returns.');
-  for (const { lot, massMg } of plan.lines) {
-    if (massMg > lot.balanceMg) faults.push(`Lot ${lot.code} does not hold that much.`);
-  }
-  return faults;
+const massFaults = (
+  { totalMg }: ChargePlan,
+  { wantedMg, overMg = 0, underMg = 0 }: ChargeRequest,
+): readonly string[] => {
+  const tooMuch = totalMg > wantedMg + overMg + weighingStepMg / 2;
+  const tooLittle = totalMg < wantedMg - underMg - weighingStepMg / 2;
+  return tooMuch || tooLittle ? ['The masses do not come to the metal wanted.'] : [];
 };
+
+const elementFaults = ({ partsWt }: ChargePlan, request: ChargeRequest): readonly string[] =>
+  elementsOf(request).flatMap((element) => {
+    const off = (partsWt[element] ?? 0) - (request.targetWt[element] ?? 0);
+    if (Math.abs(off) <= toleranceOf(request, element) + 1e-9) return [];
+    return [`${element} would be ${Math.abs(off).toFixed(2)} wt% ${off > 0 ? 'over' : 'under'} the alloy.`];
+  });
+
+const lotFaults = ({ lines }: ChargePlan): readonly string[] =>
+  lines.flatMap(({ lot, massMg }) =>
+    massMg > lot.balanceMg ? [`Lot ${lot.code} does not hold that much.`] : [],
+  );
+
+/** The faults of a plan against its request, one sentence each; an exact check, independent of the solver. */
+export const faultsOf = (plan: ChargePlan, request: ChargeRequest): readonly string[] => [
+  ...massFaults(plan, request),
+  ...elementFaults(plan, request),
+  ...(plan.worstPpt < request.markPpt - 1e-9 ? ['The fineness could fall below the mark.'] : []),
+  ...(plan.returnsShare > request.returnsShare + 1e-9 ? ['There are too many returns.'] : []),
+  ...lotFaults(plan),
+];
 
 /** Rounds grams to weighable masses that still come to the same total: the largest remainders are rounded up. */
 export const roundToWeighable = (grams: readonly number[], mostMg: readonly number[]): readonly number[] => {

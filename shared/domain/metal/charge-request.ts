@@ -1,8 +1,20 @@
 import type { LotOnHand, Parts } from './lot.ts';
 
+/** One line of a charge: how much of which lot, in whole milligrams. */
+export interface ChargeLine {
+  readonly lot: LotOnHand;
+  readonly massMg: number;
+}
+
 /** What a charge is planned for; masses in whole milligrams. */
 export interface ChargeRequest {
+  /** The mass the whole charge should come to. */
   readonly wantedMg: number;
+  /** How far the whole may be above and below that where nothing else fits; none unless given. */
+  readonly overMg?: number;
+  readonly underMg?: number;
+  /** What is in the crucible already and stays there. */
+  readonly weighed?: readonly ChargeLine[];
   /** The alloy's parts, wt%. */
   readonly targetWt: Parts;
   /** How far each element may be off, ± wt%. */
@@ -28,10 +40,20 @@ export const defaultToleranceWt = 0.1;
 export const toleranceOf = ({ toleranceWt }: Pick<ChargeRequest, 'toleranceWt'>, element: string): number =>
   toleranceWt[element] ?? defaultToleranceWt;
 
-/** Every element that the target or a lot holds. */
+/** Every element that the target, a lot or the crucible holds. */
 export const elementsOf = ({
   targetWt,
   lots,
-}: Pick<ChargeRequest, 'targetWt' | 'lots'>): readonly string[] => [
-  ...new Set([...Object.keys(targetWt), ...lots.flatMap(({ compositionWt }) => Object.keys(compositionWt))]),
+  weighed = [],
+}: Pick<ChargeRequest, 'targetWt' | 'lots' | 'weighed'>): readonly string[] => [
+  ...new Set(
+    [
+      targetWt,
+      ...[...lots, ...weighed.map(({ lot }) => lot)].map(({ compositionWt }) => compositionWt),
+    ].flatMap(Object.keys),
+  ),
 ];
+
+/** The mass of some lines, mg. */
+export const massOfLines = (lines: readonly ChargeLine[]): number =>
+  lines.reduce((sum, { massMg }) => sum + massMg, 0);

@@ -34,11 +34,6 @@ export const explainLimit = (limit: ChargeLimit, request: ChargeRequest): string
 const purity = (element: string): { readonly wt: number; readonly tolerance: number } =>
   element === 'Au' || element === 'Ag' ? { wt: 99.99, tolerance: 0.005 } : { wt: 99.9, tolerance: 0.05 };
 
-const boughtPrefix = 'bought-';
-
-/** Whether a lot of a plan is one that would have to be bought. */
-export const isBought = ({ id }: Pick<LotOnHand, 'id'>): boolean => id.startsWith(boughtPrefix);
-
 /** The request with as much fine metal of each of the alloy's elements as could be bought. */
 export const withBoughtMetal = (request: ChargeRequest): ChargeRequest => ({
   ...request,
@@ -47,14 +42,15 @@ export const withBoughtMetal = (request: ChargeRequest): ChargeRequest => ({
     ...elementsOf({ targetWt: request.targetWt, lots: [] }).map((element): LotOnHand => {
       const { wt, tolerance } = purity(element);
       return {
-        id: `${boughtPrefix}${element}`,
+        id: `bought-${element}`,
         code: '',
         name: `fine ${metalName(element)}`,
         kind: 'fine',
         compositionWt: { [element]: wt },
         toleranceWt: { [element]: tolerance },
-        balanceMg: request.wantedMg,
+        balanceMg: request.wantedMg + (request.overMg ?? 0),
         receivedAt: '9999-12-31T00:00:00.000Z',
+        isBought: true,
       };
     }),
   ],

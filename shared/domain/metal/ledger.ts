@@ -1,3 +1,5 @@
+import type { LotKind } from './lot.ts';
+
 /** Where metal can be. The first three are stores in the studio; the rest are where it goes. */
 export const metalPlaces = [
   'stock',
@@ -50,3 +52,22 @@ export const toMilligrams = (grams: number): number => Math.round(grams * 1000);
 
 /** Whole milligrams as grams. */
 export const fromMilligrams = (milligrams: number): number => milligrams / 1000;
+
+/** What a movement records. */
+export const movementKinds = [
+  'received',
+  'weighed-in',
+  'taken-out',
+  'cast',
+  'returned',
+  'lost',
+  'dispatched',
+  'counted',
+  'corrected',
+] as const;
+/** One kind of movement. */
+export type MovementKind = (typeof movementKinds)[number];
+
+/** The store in which lots of a kind lie. */
+export const storeOf = (kind: LotKind): Store =>
+  kind === 'returns' ? 'returns' : kind === 'scrap' ? 'scrap' : 'stock';

@@ -30,6 +30,8 @@ export interface LotOnHand extends Assay {
   readonly balanceMg: number;
   /** When it came, ISO 8601: the oldest returns are used first. */
   readonly receivedAt: string;
+  /** Metal that is not on hand but could be bought. */
+  readonly isBought?: true;
 }
 
 /** Least part of an element by the certificate's lower bound, wt%. */
@@ -75,3 +77,8 @@ export const mixFineness = (
 
 /** Writes a fineness in parts per thousand with one decimal, never rounded up: 749.96 is 749.9. */
 export const formatFineness = (ppt: number): string => (Math.floor(ppt * 10 + 1e-6) / 10).toFixed(1);
+
+/** What may be found out or decided about a lot after it came. */
+export const amendmentKinds = ['assay', 'quarantined', 'released', 'moved'] as const;
+/** One kind of amendment. */
+export type AmendmentKind = (typeof amendmentKinds)[number];
