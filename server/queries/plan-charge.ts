@@ -8,6 +8,7 @@ import { faultsOf, roundToWeighable, summarise, type ChargePlan } from '#shared/
 import { massOfLines, type ChargeLine, type ChargeRequest } from '#shared/domain/metal/charge-request.ts';
 import { explainLimit, withBoughtMetal } from '#shared/domain/metal/explain-shortfall.ts';
 import { planGreedily } from '#shared/domain/metal/plan-greedily.ts';
+import { settleRounding } from '#shared/domain/metal/settle-rounding.ts';
 import { writeChargeModel } from '#shared/domain/metal/write-charge-model.ts';
 import { solveLinear, type LinearSolution } from '../services/solver/solve-linear.ts';
 
@@ -76,8 +77,8 @@ const solveModel = async (
 ): Promise<Candidate | null> => {
   const solution = await solveLinear(writeChargeModel(model, 'whole'), { timeLimitS, gap: 5e-3 });
   if (!solution) return null;
-  const plan = summarise(linesOf(model, solution), request.markedMetal, request.weighed);
-  return faultsOf(plan, request).length > 0 ? null : { plan, cost: costOfLines(model, plan.lines) };
+  const plan = settleRounding(linesOf(model, solution), request);
+  return plan && { plan, cost: costOfLines(model, plan.lines) };
 };
 
 /** The best plan within a margin, with a bound under every plan's cost; null where not even the relaxed programme fits. */

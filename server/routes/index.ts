@@ -1,6 +1,7 @@
 import { alloyRoutes } from './alloys.ts';
 import { cardRoutes } from './cards.ts';
 import { castingRoutes } from './castings.ts';
+import { chargeRoutes } from './charges.ts';
 import type { Route } from './define-route.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
@@ -26,4 +27,5 @@ export const routes: readonly Route[] = [
   ...meltRoutes,
   ...lotRoutes,
   ...ledgerRoutes,
+  ...chargeRoutes,
 ];

@@ -1,19 +1,7 @@
 import type { ChargeLimit } from './charge-model.ts';
 import { elementsOf, toleranceOf, type ChargeRequest } from './charge-request.ts';
 import type { LotOnHand } from './lot.ts';
-
-const metalNames: Readonly<Record<string, string>> = {
-  Ag: 'silver',
-  Au: 'gold',
-  Cu: 'copper',
-  Zn: 'zinc',
-  Ni: 'nickel',
-  Pd: 'palladium',
-  Pt: 'platinum',
-};
-
-/** A metal's name in words, its symbol where there is none. */
-export const metalName = (element: string): string => metalNames[element] ?? element;
+import { metalName } from './metal-name.ts';
 
 /** What stands in the way of a charge, in one sentence. */
 export const explainLimit = (limit: ChargeLimit, request: ChargeRequest): string => {

@@ -1,5 +1,5 @@
-import { metalName } from './explain-shortfall.ts';
 import type { Assay, LotKind, Parts } from './lot.ts';
+import { metalName } from './metal-name.ts';
 
 /** A fault of what was typed about a lot, at its field. */
 export interface LotFault {

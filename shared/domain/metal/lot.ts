@@ -60,6 +60,31 @@ export const mixParts = (weighed: readonly Weighed[]): Parts => {
   return parts;
 };
 
+/** Decimals of a computed assay's wt%. */
+const assayStepWt = 1e-4;
+
+/**
+ * The assay of metal melted together: the parts by mass, and a tolerance that covers every composition within the
+ * certificates, widened by what rounding to four decimals could hide.
+ */
+export const mixAssay = (weighed: readonly Weighed[]): Assay => {
+  const parts = mixParts(weighed);
+  const tolerances = mixParts(
+    weighed.map(({ assay, massMg }) => ({
+      assay: { compositionWt: assay.toleranceWt, toleranceWt: {} },
+      massMg,
+    })),
+  );
+  const each = (of: (element: string) => number): Parts =>
+    Object.fromEntries(Object.keys(parts).map((element) => [element, Number(of(element).toFixed(4))]));
+  return {
+    compositionWt: each((element) => parts[element] ?? 0),
+    toleranceWt: each(
+      (element) => Math.ceil(((tolerances[element] ?? 0) + assayStepWt / 2) / assayStepWt) * assayStepWt,
+    ),
+  };
+};
+
 /** Fineness of a mixture in parts per thousand: expected, and at the certificates' lower bounds. */
 export const mixFineness = (
   weighed: readonly Weighed[],
