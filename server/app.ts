@@ -1,4 +1,4 @@
-import express, { type Express } from 'express';
+import express, { type Express, type RequestHandler } from 'express';
 import type { Sequelize } from 'sequelize';
 import type { Environment } from './environment.ts';
 import { answerErrors, unknownRoute } from './middlewares/answer-errors.ts';
@@ -59,7 +59,13 @@ export const createApp = (deps: AppDeps): App => {
 
   // Before sessions, which need the database whose health is asked for.
   for (const route of healthRoutes) mountRoute(app, services, route);
-  app.use('/api', refuseForeign, sessions.handler, passport.initialize(), passport.session());
+  app.use(
+    '/api',
+    refuseForeign,
+    sessions.handler,
+    passport.initialize(),
+    passport.session() as RequestHandler,
+  );
   app.use('/api', identify(services, passport));
   app.use(['/api/session/desk', '/api/session/terminal', '/api/terminals'], limitSignIns());
   app.use('/api', parseBody, explainBodyErrors);

@@ -5,10 +5,14 @@ import { describe, expect, it } from 'vitest';
 const ROOT = fileURLToPath(new URL('../../', import.meta.url));
 
 const alloy = (...words: readonly string[]) => {
-  const { status, stdout, stderr } = spawnSync(process.execPath, ['--import', 'tsx', 'server/cli/alloy.ts', ...words], {
-    cwd: ROOT,
-    encoding: 'utf8',
-  });
+  const { status, stdout, stderr } = spawnSync(
+    process.execPath,
+    ['--import', 'tsx', 'server/cli/alloy.ts', ...words],
+    {
+      cwd: ROOT,
+      encoding: 'utf8',
+    },
+  );
   return { status, stderr, json: (stdout ? JSON.parse(stdout) : null) as Record<string, unknown> | null };
 };
 
@@ -17,12 +21,16 @@ describe('the alloy command', { timeout: 30_000 }, () => {
     const { status, json } = alloy('range', 'Ag 92.5 Cu 7.5');
     expect(status).toBe(0);
     expect(json).toMatchObject({ withinModel: true, reason: null });
-    expect(Object.keys(json ?? {})).toEqual(expect.arrayContaining(['liquidusC', 'solidusC', 'asCastSolidusC']));
+    expect(Object.keys(json ?? {})).toEqual(
+      expect.arrayContaining(['liquidusC', 'solidusC', 'asCastSolidusC']),
+    );
   });
 
   it('prints a state and a path', () => {
     const state = alloy('state', 'Ag 92.5 Cu 7.5', '850').json;
-    expect(Object.keys(state ?? {})).toEqual(expect.arrayContaining(['phases', 'solidMassFraction', 'degreesOfFreedom']));
+    expect(Object.keys(state ?? {})).toEqual(
+      expect.arrayContaining(['phases', 'solidMassFraction', 'degreesOfFreedom']),
+    );
     const path = alloy('path', 'Ag 92.5 Cu 7.5', '--rule', 'scheil', '--step', '5').json;
     expect(path?.['points']).toContainEqual(expect.objectContaining({ temperatureC: 850 }));
   });

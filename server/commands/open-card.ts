@@ -7,6 +7,8 @@ import { buildCode } from '#shared/lib/codes.ts';
 import { AppError } from '../errors.ts';
 import type { Melt } from '../models/melt.ts';
 import type { AtTerminal } from '../policies/actor.ts';
+import { meltPolicy } from '../policies/melt.ts';
+import { can } from '../policies/policy.ts';
 import { cardContextOf } from '../queries/card-context.ts';
 import { loadCasting, type LoadedCasting } from '../queries/load-casting.ts';
 import { loadInstruction } from '../queries/load-instruction.ts';
@@ -27,7 +29,7 @@ const elsewhere = async ({ models }: Services, melt: Melt): Promise<AppError> =>
   return new AppError('card-elsewhere', sentence);
 };
 
-/** Goes on with an open card: at the terminal that holds it, or taken along by the person who opened it. */
+/** Goes on with an open card: at the terminal that holds it, or taken along from another one. */
 const carryOn = async (
   services: Services,
   actor: AtTerminal,
@@ -35,7 +37,7 @@ const carryOn = async (
   request: OpenCard,
 ): Promise<Melt> => {
   const holdsIt = melt.terminalId === actor.terminal.id;
-  const mayTakeAlong = request.carryOn && melt.openedBy === actor.person.id;
+  const mayTakeAlong = request.carryOn && can(meltPolicy.takeAlong, actor, melt);
   if (!holdsIt && !mayTakeAlong) throw await elsewhere(services, melt);
   if (holdsIt && melt.openedBy === actor.person.id) return melt;
   await melt.update({ terminalId: actor.terminal.id, openedBy: actor.person.id });

@@ -86,13 +86,16 @@ export const identify =
 /** The actor as it stands after a sign-in or sign-out within this request. */
 export const actorOf = (http: Http): Actor => readActor(http);
 
+const asError = (error: unknown): Error =>
+  error instanceof Error ? error : new Error('Sign-in gave neither a person nor a reason.');
+
 const authenticate = ({ request, response }: Http, strategy: 'password' | 'pin'): Promise<Express.User> =>
   new Promise((resolve, reject) => {
     const done = (error: unknown, user?: Express.User | false): void => {
       if (user) resolve(user);
-      else reject(error instanceof Error ? error : new Error('Sign-in gave neither a person nor a reason.'));
+      else reject(asError(error));
     };
-    const passport = response.locals.passport as PassportInstance;
+    const { passport } = response.locals;
     (passport.authenticate(strategy, done) as RequestHandler)(request, response, reject);
   });
 
@@ -114,7 +117,7 @@ export const signIn = async (
   request.body = credentials;
   const user = await authenticate(http, strategy);
   await new Promise<void>((resolve, reject) => {
-    request.logIn(user, (error?: unknown) => (error ? reject(error as Error) : resolve()));
+    request.logIn(user, (error?: unknown) => (error ? reject(asError(error)) : resolve()));
   });
   request.session.place = place;
   if (strategy === 'pin') request.session.terminalId = response.locals.terminal?.id;
@@ -124,7 +127,7 @@ export const signIn = async (
 export const signOut = ({ request }: Http): Promise<void> =>
   new Promise((resolve, reject) => {
     request.logOut((error?: unknown) => {
-      if (error) return reject(error as Error);
-      request.session.destroy((failure?: unknown) => (failure ? reject(failure as Error) : resolve()));
+      if (error) return reject(asError(error));
+      request.session.destroy((failure?: unknown) => (failure ? reject(asError(failure)) : resolve()));
     });
   });

@@ -16,6 +16,11 @@ export const meltPolicy = {
     who: worksAtFurnace,
     when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
   },
+  /** Who opened a card takes it to another terminal; the owner too, when that person or that terminal is gone. */
+  takeAlong: {
+    who: worksAtFurnace,
+    when: (actor: Actor, melt: Melt) => melt.openedBy === actor.person?.id || isAny(actor, 'owner'),
+  },
   /** An apprentice ends no card and stands by no doubtful reading. */
   decide: { who: (actor: Actor) => isAtTerminal(actor) && isAny(actor, 'owner', 'caster') },
   amend: { who: (actor: Actor) => actor.via === 'desk' && isAny(actor, 'owner', 'caster') },

@@ -8,5 +8,7 @@ export const boundsOfLocalDay = (
 ): { readonly from: Date; readonly to: Date } => {
   const zone = tz(timeZone);
   const from = startOfDay(parseISO(day, { in: zone }), { in: zone });
-  return { from: new Date(from.getTime()), to: new Date(addDays(from, 1, { in: zone }).getTime()) };
+  // The day may begin at one o'clock, where midnight is skipped; the next one need not.
+  const to = startOfDay(addDays(from, 1, { in: zone }), { in: zone });
+  return { from: new Date(from.getTime()), to: new Date(to.getTime()) };
 };

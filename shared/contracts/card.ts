@@ -58,7 +58,7 @@ export type RecordEventRequest = z.input<typeof recordEventRequest>;
 /** Looks up what a scanned or typed code means; the code is judged by the flask code's own rules. */
 export const findCardQuery = z.object({ code: z.string().max(500, 'That is far longer than a flask code.') });
 
-/** Opens a casting's card at this terminal; `carryOn` takes over one's own card from another terminal. */
+/** Opens a casting's card at this terminal; `carryOn` takes one's own card, or as the owner anyone's, along from another terminal. */
 export const openCardRequest = z.object({
   key: z.uuid(),
   occurredAt: instant,

@@ -40,7 +40,12 @@ interface AnnealPractice {
 
 /** Anneal temperatures as trade sheets print them; the metal's own sheet comes first. */
 const ANNEALS: readonly AnnealPractice[] = [
-  { holds: (wt) => wt('Ag') >= 80 && wt('Ag') < 99, fromC: 593, toC: 649, metal: 'sterling and like silvers' },
+  {
+    holds: (wt) => wt('Ag') >= 80 && wt('Ag') < 99,
+    fromC: 593,
+    toC: 649,
+    metal: 'sterling and like silvers',
+  },
   { holds: (wt) => wt('Au') >= 70 && wt('Au') < 80, fromC: 650, toC: 704, metal: '18 ct golds' },
   { holds: (wt) => wt('Au') >= 33 && wt('Au') < 65, fromC: 600, toC: 675, metal: '9 to 14 ct golds' },
 ];
@@ -52,11 +57,18 @@ const limit = (temperatureC: number | null, basis: string): BenchLimit => ({
   basis,
 });
 
-const noWindow = (basis: string): BenchWindow => ({ fromC: null, toC: null, marginC: FURNACE_MARGIN_C, basis });
+const noWindow = (basis: string): BenchWindow => ({
+  fromC: null,
+  toC: null,
+  marginC: FURNACE_MARGIN_C,
+  basis,
+});
 
 const solutionWindow = ({ solvusC, asCastSolidusC }: MeltingRange): BenchWindow => {
-  if (solvusC === null) return noWindow('No solvus: the solid is of one kind throughout, or never becomes so.');
-  if (asCastSolidusC === null) return noWindow('The as-cast limit is not known, so no upper end can be named.');
+  if (solvusC === null)
+    return noWindow('No solvus: the solid is of one kind throughout, or never becomes so.');
+  if (asCastSolidusC === null)
+    return noWindow('The as-cast limit is not known, so no upper end can be named.');
   const toC = asCastSolidusC - FURNACE_MARGIN_C;
   if (toC <= solvusC) {
     return noWindow(
@@ -71,7 +83,8 @@ const annealWindow = (composition: Composition, { asCastSolidusC, solidusC }: Me
   const practice = ANNEALS.find(({ holds }) => holds((element) => composition[element] ?? 0));
   if (!practice) return noWindow('No anneal is held for this kind of metal.');
   const ceiling = (asCastSolidusC ?? solidusC) - FURNACE_MARGIN_C;
-  if (ceiling <= practice.fromC) return noWindow('The usual anneal comes too near to melting for this alloy.');
+  if (ceiling <= practice.fromC)
+    return noWindow('The usual anneal comes too near to melting for this alloy.');
   return {
     fromC: practice.fromC,
     toC: Math.min(practice.toC, ceiling),
@@ -92,7 +105,10 @@ export const benchFigures = (composition: Composition): Outcome<BenchFigures> =>
         ? 'Not computed: the last liquid leaves the model. Use a measured limit.'
         : 'Where the last metal to freeze in the mould melts again (Scheil-Gulliver).',
     ),
-    torchCeilingHomogenisedC: limit(range.solidusC, 'Equilibrium solidus; holds only for metal homogenised by a long anneal.'),
+    torchCeilingHomogenisedC: limit(
+      range.solidusC,
+      'Equilibrium solidus; holds only for metal homogenised by a long anneal.',
+    ),
     solutionWindowC: solutionWindow(range),
     annealWindowC: annealWindow(composition, range),
   };

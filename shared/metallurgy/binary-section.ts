@@ -33,7 +33,8 @@ export interface SectionAxis {
 export const sectionAxis = (request: SectionRequest): Outcome<SectionAxis> => {
   if (request.kind === 'carat') {
     const { goldWt } = request;
-    if (!(goldWt > 0 && goldWt < 100)) return refuse('option', 'The gold of a carat section must lie between 0 and 100 wt%.');
+    if (!(goldWt > 0 && goldWt < 100))
+      return refuse('option', 'The gold of a carat section must lie between 0 and 100 wt%.');
     const compositionAt = (x: number) => ({ Au: goldWt, Ag: 100 - goldWt - x, Cu: x });
     return { withinModel: true, xElement: 'Cu', xMin: 0, xMax: 100 - goldWt, compositionAt };
   }
@@ -59,7 +60,8 @@ const liquidusAndSolidus = (axis: SectionAxis, engine: Engine): SectionBoundary[
     if (!job.withinModel) continue;
     const { liquidusC, solidusC } = rangeOf(job);
     liquidus.push({ x, temperatureC: liquidusC });
-    if (equilibrium(axis.compositionAt(x), solidusC, engine).withinModel) solidus.push({ x, temperatureC: solidusC });
+    if (equilibrium(axis.compositionAt(x), solidusC, engine).withinModel)
+      solidus.push({ x, temperatureC: solidusC });
   }
   return [
     { name: 'liquidus', points: liquidus },
@@ -86,7 +88,12 @@ export const binarySection = (request: SectionRequest, engine: Engine = ENGINE):
 };
 
 /** The phases at a place of a section, with where each lies along its axis. */
-export const tieLine = (section: Section, x: number, temperatureC: number, engine: Engine = ENGINE): Outcome<TieLine> => {
+export const tieLine = (
+  section: Section,
+  x: number,
+  temperatureC: number,
+  engine: Engine = ENGINE,
+): Outcome<TieLine> => {
   const axis = sectionAxis(section.request);
   if (!axis.withinModel) return axis;
   if (!(x >= axis.xMin && x <= axis.xMax)) {
@@ -96,7 +103,8 @@ export const tieLine = (section: Section, x: number, temperatureC: number, engin
   if (!state.withinModel) return state;
   const { withinModel: _, ...plain } = state;
   const gold = section.request.kind === 'carat' ? section.request.goldWt : null;
-  const inPlane = gold === null || state.phases.every((phase) => Math.abs((phase.wt['Au'] ?? 0) - gold) < 1e-6);
+  const inPlane =
+    gold === null || state.phases.every((phase) => Math.abs((phase.wt['Au'] ?? 0) - gold) < 1e-6);
   const ends = state.phases.map((phase) => ({
     name: phase.name,
     x: phase.wt[axis.xElement] ?? 0,

@@ -25,7 +25,13 @@ export const liquidusK = ({ minimiser, system, x }: Job): number => {
     for (let i = 0; i < n; i++) slope -= search.foundX[at + i]! * liquidSlopes[i]!;
     return { value, slope };
   };
-  return bracketedNewton(sample, { low: LOW_K, high: HIGH_K, start: 1200, rising: true, tolerance: TOLERANCE_K });
+  return bracketedNewton(sample, {
+    low: LOW_K,
+    high: HIGH_K,
+    start: 1200,
+    rising: true,
+    tolerance: TOLERANCE_K,
+  });
 };
 
 /** The temperature, K, at which the first liquid forms on heating the homogenised solid; `liquidus` in K bounds it. */

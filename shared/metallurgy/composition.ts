@@ -9,7 +9,7 @@ export const SUM_TOLERANCE_WT = 0.05;
 export const TRACE_LIMIT_WT = 0.02;
 
 /** An element of the model below this is taken as absent, wt%. */
-const ABSENT_WT = 1e-9;
+const ABSENT_WT = 1e-11;
 
 const OTHER_ELEMENTS = new Set(
   (

@@ -39,7 +39,10 @@ export const density = (composition: Composition): Outcome<Density> => {
   if (Math.abs(sum - 100) > 0.5) {
     return refuse('composition-sum', `The composition adds up to ${Number(sum.toFixed(3))} wt%, not 100.`);
   }
-  const plain = parts.every(([element, wt]) => element !== 'Zn' || wt <= ZINC_LIMIT) && !composition['Ni'] && !composition['Pd'];
+  const plain =
+    parts.every(([element, wt]) => element !== 'Zn' || wt <= ZINC_LIMIT) &&
+    !composition['Ni'] &&
+    !composition['Pd'];
   return {
     withinModel: true,
     gPerCm3: sum / volume,

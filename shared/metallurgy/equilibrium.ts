@@ -3,7 +3,15 @@ import { coldLiquidRefusal, temperatureRefusal, zincRefusal } from './limits.ts'
 import { FCC, LIQUID, ZERO_CELSIUS_K } from './model.ts';
 import { refuse } from './refusal.ts';
 import type { System } from './system.ts';
-import type { ByElement, Composition, EquilibriumState, Outcome, Phase, PhaseName, Refusal } from './types.ts';
+import type {
+  ByElement,
+  Composition,
+  EquilibriumState,
+  Outcome,
+  Phase,
+  PhaseName,
+  Refusal,
+} from './types.ts';
 
 const byElement = (system: System, value: (i: number) => number): ByElement =>
   Object.fromEntries(system.elements.map((element, i) => [element, value(i)]));
@@ -24,7 +32,9 @@ export const toWt = (system: System, x: Float64Array, at: number): ByElement => 
 const fccName = (job: Job, p: number): PhaseName => {
   const { split } = job.minimiser;
   const { n, elements } = job.system;
-  const others = Array.from({ length: split.count }, (_, q) => q).filter((q) => q !== p && split.phase[q] === FCC);
+  const others = Array.from({ length: split.count }, (_, q) => q).filter(
+    (q) => q !== p && split.phase[q] === FCC,
+  );
   if (others.length === 0) return 'fcc';
   const silver = elements.indexOf('Ag');
   const mine = split.x[p * n + silver] ?? 0;
@@ -68,8 +78,11 @@ export const readState = (job: Job): EquilibriumState => {
   const { system } = job;
   const wholeMass = meanMass(system, job.x, 0);
   const phases = Array.from({ length: split.count }, (_, p) => phaseAt(job, p, wholeMass));
-  phases.sort((a, b) => Number(b.name === 'liquid') - Number(a.name === 'liquid') || b.massFraction - a.massFraction);
-  const liquidMassFraction = phases.reduce((sum, p) => (p.name === 'liquid' ? sum + p.massFraction : sum), 0);
+  phases.sort(
+    (a, b) => Number(b.name === 'liquid') - Number(a.name === 'liquid') || b.massFraction - a.massFraction,
+  );
+  const liquidMassFraction =
+    phases[0]?.name !== 'liquid' ? 0 : phases.length === 1 ? 1 : phases[0].massFraction;
   return {
     temperatureC: system.temperature - ZERO_CELSIUS_K,
     phases,

@@ -41,7 +41,8 @@ const leverFraction = (state: EquilibriumState): SolidFraction => ({
 /** The liquidus, every whole multiple of `step` below it, a hair above the end, and the end. */
 const readings = (liquidusC: number, endC: number, step: number): number[] => {
   const temperatures = [liquidusC];
-  for (let k = Math.ceil(liquidusC / step) - 1; k * step > endC + JUST_ABOVE_C; k--) temperatures.push(k * step);
+  for (let k = Math.ceil(liquidusC / step) - 1; k * step > endC + JUST_ABOVE_C; k--)
+    temperatures.push(k * step);
   if (liquidusC > endC + JUST_ABOVE_C) temperatures.push(endC + JUST_ABOVE_C);
   temperatures.push(endC);
   return temperatures;
@@ -56,7 +57,9 @@ const nudge = (t: number, liquidusC: number, solidusC: number, first: boolean): 
 /** Drops the reading a hair above the end where nothing freezes at once there. */
 const withoutRepeat = (points: readonly PathPoint[]): readonly PathPoint[] => {
   const hair = points.at(-2);
-  return points.length > 2 && hair && hair.solidMassFraction > 1 - SUDDEN ? points.toSpliced(-2, 1) : points;
+  const end = points.at(-1);
+  if (points.length < 3 || !hair || !end) return points;
+  return end.solidMassFraction - hair.solidMassFraction < SUDDEN ? points.toSpliced(-2, 1) : points;
 };
 
 const leverPath = (job: Job, step: number): Outcome<FreezingPath> => {
@@ -73,19 +76,44 @@ const leverPath = (job: Job, step: number): Outcome<FreezingPath> => {
   return { withinModel: true, rule: 'lever', points: withoutRepeat(points), endsC: solidusC, note: job.note };
 };
 
+/**
+ * Without diffusion metal may run ahead of the lever rule: by thousandths where the solidus is retrograde (copper-rich
+ * silver-copper), and within a degree of a second solid where gold lifts the eutectic valley. Solid beyond what
+ * equilibrium allows would melt again, so the fraction is held at the lever one.
+ */
+const heldAtLever = (
+  job: Job,
+  temperatureC: number,
+  fraction: SolidFraction,
+  endsC: number | null = null,
+): SolidFraction => {
+  if (endsC !== null && temperatureC <= endsC) return fraction;
+  if (fraction.solidMassFraction === 0) return fraction;
+  const lever = stateOf(job, temperatureC);
+  if (!lever.withinModel || lever.solidMassFraction >= fraction.solidMassFraction) return fraction;
+  return { ...fraction, solidMassFraction: lever.solidMassFraction };
+};
+
 const scheilPath = (job: Job, step: number): Outcome<FreezingPath> => {
   const freeze = scheilFreeze(job);
-  const first = freeze.nodes[0];
-  if (!first) return refuse('phase-outside-model', freeze.note ?? 'The freeze could not be followed.');
+  if (freeze.nodes.length === 0)
+    return refuse('phase-outside-model', freeze.note ?? 'The freeze could not be followed.');
   const curve = new ScheilCurve(job, freeze);
-  const { endC, lowestC } = curve;
+  const { liquidusC, solidusC } = rangeOf(job);
+  const endsC = curve.endC === null ? null : Math.min(curve.endC, solidusC);
   const points: PathPoint[] = [];
-  for (const temperatureC of readings(rangeOf(job).liquidusC, lowestC, step)) {
-    const ended = temperatureC <= lowestC && endC !== null;
-    const fraction = curve.at(ended ? lowestC - JUST_ABOVE_C : temperatureC);
-    if (fraction) points.push({ ...fraction, temperatureC });
+  for (const temperatureC of readings(liquidusC, endsC ?? curve.lowestC, step)) {
+    const first = points.length === 0;
+    const fraction = curve.at(endsC === null ? temperatureC : nudge(temperatureC, liquidusC, endsC, first));
+    if (fraction) points.push({ ...heldAtLever(job, temperatureC, fraction, endsC), temperatureC });
   }
-  return { withinModel: true, rule: 'scheil', points: withoutRepeat(points), endsC: endC, note: freeze.note ?? job.note };
+  return {
+    withinModel: true,
+    rule: 'scheil',
+    points: withoutRepeat(points),
+    endsC,
+    note: freeze.note ?? job.note,
+  };
 };
 
 /** How an alloy freezes from its liquidus down, by the lever rule or by Scheil-Gulliver, read every `stepC` °C (5 unless told). */
@@ -120,6 +148,6 @@ export const solidFractionAt = (
   if (refusal) return refusal;
   const freeze = scheilFreeze(job);
   const fraction = freeze.nodes.length > 0 ? new ScheilCurve(job, freeze).at(temperatureC) : null;
-  if (fraction) return { withinModel: true, ...fraction };
+  if (fraction) return { withinModel: true, ...heldAtLever(job, temperatureC, fraction) };
   return refuse('phase-outside-model', freeze.note ?? 'The freeze could not be followed so far.');
 };

@@ -2,6 +2,7 @@ export * from './types.ts';
 export { equilibrium } from './equilibrium.ts';
 export { meltingRange } from './melting-range.ts';
 export { freezingPath, solidFractionAt } from './freezing-path.ts';
+export { leverRule, type LeverFractions } from './lever-rule.ts';
 export { binarySection, tieLine } from './binary-section.ts';
 export { rangeBand } from './range-band.ts';
 export { density, metalFromWax, type Density } from './density.ts';

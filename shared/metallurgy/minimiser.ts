@@ -5,6 +5,8 @@ import type { System } from './system.ts';
 
 /** A phase this far below the plane, J/mol, is one that must be added. */
 const UNSTABLE = -1e-7;
+/** Within 0.0001 K of an invariant a missing phase is nearer the plane than rounding lets its matter be moved, J/mol. */
+const INDISTINGUISHABLE = -1e-3;
 const MAX_ROUNDS = 24;
 
 /** Which phases a minimisation may use. */
@@ -33,7 +35,7 @@ export class Minimiser {
       if (missing < 0) return true;
       const { search, split, system } = this;
       if (!split.add(search.foundPhase[missing]!, search.foundX, missing * system.n)) {
-        return search.foundDistance[missing]! > 100 * UNSTABLE;
+        return search.foundDistance[missing]! > INDISTINGUISHABLE;
       }
       if (!split.settle()) return false;
     }
@@ -53,6 +55,7 @@ export class Minimiser {
     const { search, split, system, plane } = this;
     for (let i = 0; i < system.n; i++) plane[i] = split.mu[split.main * system.n + i]!;
     search.clear();
+    for (let p = 0; p < split.count; p++) search.addKnown(split.phase[p]!, split.x, p * system.n);
     if (allowed !== 'solid') search.search(LIQUID, plane, UNSTABLE);
     if (allowed !== 'liquid') search.search(FCC, plane, UNSTABLE);
     return search.lowest();

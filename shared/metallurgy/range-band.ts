@@ -8,10 +8,12 @@ const NUDGE_WT = 0.01;
 type Amounts = Record<string, number>;
 
 const signChoices = (count: number): number[][] =>
-  count === 0 ? [[]] : signChoices(count - 1).flatMap((rest) => [
-    [...rest, -1],
-    [...rest, 1],
-  ]);
+  count === 0
+    ? [[]]
+    : signChoices(count - 1).flatMap((rest) => [
+        [...rest, -1],
+        [...rest, 1],
+      ]);
 
 /** The corners of what a composition may be: each element at a limit of its tolerance but one, which makes up 100. */
 const corners = (composition: Composition, tolerance: Readonly<Amounts>): Amounts[] => {
@@ -48,7 +50,10 @@ const nudged = (composition: Composition, element: string, by: number): Amounts 
   const wt = composition[element] ?? 0;
   const rest = 100 - wt;
   return Object.fromEntries(
-    Object.entries(composition).map(([e, amount]) => [e, e === element ? amount + by : amount * (1 - by / rest)]),
+    Object.entries(composition).map(([e, amount]) => [
+      e,
+      e === element ? amount + by : amount * (1 - by / rest),
+    ]),
   );
 };
 
@@ -69,7 +74,8 @@ const sensitivityTo = (composition: Composition, element: string, engine: Engine
 
 const toleranceFault = (composition: Composition, toleranceWt: Readonly<Amounts>): string | null => {
   for (const [element, wt] of Object.entries(toleranceWt)) {
-    if (!(element in composition)) return `A tolerance is given for ${element}, which the alloy does not hold.`;
+    if (!(element in composition))
+      return `A tolerance is given for ${element}, which the alloy does not hold.`;
     if (!Number.isFinite(wt) || wt < 0) return `The tolerance of ${element} must be a number not below zero.`;
   }
   return null;

@@ -4,12 +4,31 @@ import { ZERO_CELSIUS_K } from './model.ts';
 import type { ScheilFreeze, ScheilNode } from './scheil-walk.ts';
 import type { ByElement, SolidFraction } from './types.ts';
 
-const hermite = (from: number, to: number, fromSlope: number, toSlope: number, h: number, u: number): number => {
+const hermite = (
+  from: number,
+  to: number,
+  fromSlope: number,
+  toSlope: number,
+  h: number,
+  u: number,
+): number => {
   const v = 1 - u;
-  return (1 + 2 * u) * v * v * from + u * v * v * h * fromSlope + u * u * (3 - 2 * u) * to - u * u * v * h * toSlope;
+  return (
+    (1 + 2 * u) * v * v * from +
+    u * v * v * h * fromSlope +
+    u * u * (3 - 2 * u) * to -
+    u * u * v * h * toSlope
+  );
 };
 
-const hermiteSlope = (from: number, to: number, fromSlope: number, toSlope: number, h: number, u: number): number =>
+const hermiteSlope = (
+  from: number,
+  to: number,
+  fromSlope: number,
+  toSlope: number,
+  h: number,
+  u: number,
+): number =>
   (6 * u * (1 - u) * (to - from)) / h + (1 - u) * (1 - 3 * u) * fromSlope + u * (3 * u - 2) * toSlope;
 
 /** Reads a Scheil freeze at any temperature, between its nodes by cubic Hermite curves. */
@@ -43,7 +62,7 @@ export class ScheilCurve {
     const t = temperatureC + ZERO_CELSIUS_K;
     const first = nodes[0]!;
     const last = nodes.at(-1)!;
-    if (t >= first.t && this.freeze.nodes.length > 1 || t > first.t) return { solidMassFraction: 0, solidWt: null, liquidWt: this.wt(first.liquid) };
+    if (t >= first.t) return { solidMassFraction: 0, solidWt: null, liquidWt: this.wt(first.liquid) };
     if (t < last.t) {
       const solid = { solidMassFraction: 1, solidWt: this.formingAt(last), liquidWt: null };
       return this.freeze.end === 'left-model' ? null : solid;
@@ -70,7 +89,11 @@ export class ScheilCurve {
     }
     const { system, x } = this.job;
     const left = (Math.exp(-(a.s + u * h)) * meanMass(system, liquid, 0)) / meanMass(system, x, 0);
-    return { solidMassFraction: Math.min(1, Math.max(0, 1 - left)), solidWt: this.wt(solid), liquidWt: this.wt(liquid) };
+    return {
+      solidMassFraction: Math.min(1, Math.max(0, 1 - left)),
+      solidWt: this.wt(solid),
+      liquidWt: this.wt(liquid),
+    };
   }
 
   private wt(x: Float64Array): ByElement {

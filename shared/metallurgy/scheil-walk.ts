@@ -6,18 +6,19 @@ import { coldLiquidRefusal, zincRefusal } from './limits.ts';
 import { FCC, LIQUID } from './model.ts';
 import type { Minimiser } from './minimiser.ts';
 import type { System } from './system.ts';
+import type { Refusal } from './types.ts';
 
 /** A casting counts as frozen when this mass fraction of liquid is left. */
 export const LAST_LIQUID = 1e-3;
 
 /** The freeze starts in short steps, where lever and Scheil lie closest, and lengthens them. */
 const FIRST_STEP = 1 / 32;
-const LONGEST_STEP = 0.5;
+const LONGEST_STEP = 0.25;
 const MAX_TURNS = 400;
 const LOST = 'The freeze could not be followed further.';
 const SHORTEST_STEP = 1e-4;
 /** A solid moving further than this in one step, mole fraction, asks for a shorter one. */
-const LARGEST_MOVE = 0.05;
+const LARGEST_MOVE = 0.03;
 const NEW_SOLID = -1e-6;
 /** A new solid this little below the plane has only just appeared, J/mol. */
 const LOCATED = -1e-5;
@@ -62,7 +63,11 @@ class ScheilWalk {
   private readonly place: Place = { t: 0, tSlope: 0, share: 1 };
   private liquid: Float64Array;
   private s = 0;
-  private reseeding = false;
+  private restarting = false;
+  /** The new solid at whose first appearance the last step ended. */
+  private arrived: Float64Array | null = null;
+  /** A solid has just begun to dissolve: it is not looked for again until the liquid has moved on. */
+  private dropped = false;
   /** How long the next step may be. */
   private step = FIRST_STEP;
 
@@ -85,20 +90,22 @@ class ScheilWalk {
 
   run(): ScheilFreeze {
     const nodes: ScheilNode[] = [];
-    const finish = (end: ScheilFreeze['end'], note: string | null = null): ScheilFreeze => ({ nodes, end, note });
+    const finish = (end: ScheilFreeze['end'], note: string | null = null): ScheilFreeze => ({
+      nodes,
+      end,
+      note,
+    });
     for (let turn = 0; turn < MAX_TURNS; turn++) {
-      this.admitNewSolid();
       if (!this.derive(this.liquid)) return finish('left-model', LOST);
       if (this.solids.length === 2 && this.dropDissolving()) continue;
-      const left = this.leftAtNode();
-      const refusal =
-        zincRefusal(this.system, LIQUID, this.liquid, 0) ??
-        coldLiquidRefusal(this.system) ??
-        this.solids.map((solid) => zincRefusal(this.system, FCC, solid, 0)).find((r) => r !== null);
+      const refusal = this.refusal();
       if (refusal) return finish('left-model', refusal.reason);
+      const left = this.leftAtNode();
       nodes.push(this.node(left));
-      if (left <= LAST_LIQUID || this.system.n === 1) return finish(this.system.n === 1 ? 'isothermal' : 'frozen');
       if (this.solids.length === this.system.n) return finish('isothermal');
+      if (left <= LAST_LIQUID) return finish('frozen');
+      // The node before a new solid keeps the slopes that lead up to it; the next one has those that lead away.
+      if (this.admitNewSolid()) continue;
       if (!this.advance(left)) return finish('left-model', LOST);
     }
     return finish('left-model', LOST);
@@ -123,9 +130,9 @@ class ScheilWalk {
   private derive(liquid: Float64Array, withSlope = true): boolean {
     const { place, slope, solids, solvers } = this;
     const { n } = this.system;
-    if (this.reseeding) this.reseed(liquid);
+    if (this.restarting) this.restart(liquid);
     const first = solids[0]!;
-    const t = this.reseeding ? place.t : solvers[0].solve(liquid, first, place.t);
+    const t = this.restarting ? place.t : solvers[0].solve(liquid, first, place.t);
     if (!Number.isFinite(t)) return false;
     place.t = t;
     place.share = 1;
@@ -145,7 +152,7 @@ class ScheilWalk {
   }
 
   /** Finds the one solid that goes with a liquid from nothing: for places where two solids become one and Newton steps fail. */
-  private reseed(liquid: Float64Array): void {
+  private restart(liquid: Float64Array): void {
     const { minimiser, system } = this;
     this.place.t = liquidusK({ minimiser, system, x: liquid, note: null });
     const at = minimiser.search.lowest() * system.n;
@@ -170,13 +177,27 @@ class ScheilWalk {
     if (share >= 0 && share <= 1) return false;
     if (share < 0) this.solids.shift();
     else this.solids.pop();
+    this.dropped = true;
     return true;
   }
 
-  /** Takes in a solid of another kind that the liquid has come to. */
-  private admitNewSolid(): void {
-    const found = this.solids.length === 1 ? this.newSolid() : null;
+  private refusal(): Refusal | null {
+    const solids = this.solids.map((solid) => zincRefusal(this.system, FCC, solid, 0));
+    return (
+      zincRefusal(this.system, LIQUID, this.liquid, 0) ??
+      coldLiquidRefusal(this.system) ??
+      solids.find((refusal) => refusal !== null) ??
+      null
+    );
+  }
+
+  /** Takes in a solid of another kind that the liquid has come to; says whether there was one. */
+  private admitNewSolid(): boolean {
+    const looks = this.solids.length === 1 && !this.dropped;
+    const found = this.arrived ?? (looks ? this.newSolid() : null);
+    this.arrived = null;
     if (found) this.solids.push(found);
+    return found !== null;
   }
 
   private newSolid(): Float64Array | null {
@@ -186,6 +207,7 @@ class ScheilWalk {
     system.setTemperature(this.place.t);
     system.potentials(LIQUID, this.liquid, 0, plane, 0);
     search.clear();
+    search.addKnown(FCC, this.solids[0]!, 0);
     search.search(FCC, plane, NEW_SOLID);
     const at = search.lowest() * n;
     return at < 0 ? null : search.foundX.slice(at, at + n);
@@ -212,12 +234,13 @@ class ScheilWalk {
       h *= Math.max(0.25, (0.8 * LARGEST_MOVE) / moved);
     }
     if (h <= SHORTEST_STEP) {
-      this.reseeding = true;
+      this.restarting = true;
       const went = go(h);
-      this.reseeding = false;
+      this.restarting = false;
       if (!went) return false;
     }
-    const found = this.solids.length === 1 ? this.newSolid() : null;
+    const found = this.solids.length === 1 && !this.dropped ? this.newSolid() : null;
+    this.dropped = false;
     if (found) h = this.locate(found, h, go);
     const growth = Math.min(2, (0.8 * LARGEST_MOVE) / moved);
     this.step = Math.max(found ? FIRST_STEP : h * growth, 2 * SHORTEST_STEP);
@@ -233,7 +256,7 @@ class ScheilWalk {
     return most;
   }
 
-  /** Shortens a step so that it ends where the new solid first appears, and takes that solid in; returns the step. */
+  /** Shortens a step so that it ends where the new solid first appears; returns the step. */
   private locate(found: Float64Array, step: number, go: (h: number) => boolean): number {
     const other = found.slice();
     let low = 0;
@@ -257,7 +280,7 @@ class ScheilWalk {
       }
     }
     go(high);
-    this.solids.push(found);
+    this.arrived = found;
     return high;
   }
 

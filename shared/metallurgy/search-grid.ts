@@ -53,7 +53,9 @@ export const createSearchGrid = (system: System): SearchGrid => {
       return system.excess(x, at, pairs, triples);
     });
   const slope = (phase: 0 | 1) =>
-    each((at, k) => system.excess(x, at, system.pairSlopes[phase], system.tripleSlopes[phase]) + (ideal[k] ?? 0));
+    each(
+      (at, k) => system.excess(x, at, system.pairSlopes[phase], system.tripleSlopes[phase]) + (ideal[k] ?? 0),
+    );
   return {
     count,
     x,

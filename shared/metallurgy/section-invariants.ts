@@ -6,7 +6,11 @@ import type { SectionBoundary, SectionInvariant, SectionPoint, SectionRequest } 
 
 const HAIR_C = 1e-5;
 
-const eutectic = (axis: SectionAxis, solidus: readonly SectionPoint[], engine: Engine): SectionInvariant[] => {
+const eutectic = (
+  axis: SectionAxis,
+  solidus: readonly SectionPoint[],
+  engine: Engine,
+): SectionInvariant[] => {
   for (const { x, temperatureC } of solidus) {
     const below = equilibrium(axis.compositionAt(x), temperatureC - HAIR_C, engine);
     const above = equilibrium(axis.compositionAt(x), temperatureC + HAIR_C, engine);
@@ -20,8 +24,15 @@ const eutectic = (axis: SectionAxis, solidus: readonly SectionPoint[], engine: E
   return [];
 };
 
-const congruentMinimum = (axis: SectionAxis, liquidus: readonly SectionPoint[], engine: Engine): SectionInvariant[] => {
-  const at = liquidus.reduce((best, point, k) => (point.temperatureC < (liquidus[best]?.temperatureC ?? 0) ? k : best), 0);
+const congruentMinimum = (
+  axis: SectionAxis,
+  liquidus: readonly SectionPoint[],
+  engine: Engine,
+): SectionInvariant[] => {
+  const at = liquidus.reduce(
+    (best, point, k) => (point.temperatureC < (liquidus[best]?.temperatureC ?? 0) ? k : best),
+    0,
+  );
   const before = liquidus[at - 1];
   const after = liquidus[at + 1];
   if (!before || !after || after.x >= axis.xMax - 1 || before.x <= axis.xMin + 1) return [];

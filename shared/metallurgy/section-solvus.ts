@@ -29,7 +29,11 @@ const binarySolvus = (axis: SectionAxis, top: SectionPoint, engine: Engine): Sec
 };
 
 /** In a carat section the tie lines leave the plane: the solvus is found alloy by alloy. */
-const caratSolvus = (axis: SectionAxis, solidus: readonly SectionPoint[], engine: Engine): SectionBoundary[] => {
+const caratSolvus = (
+  axis: SectionAxis,
+  solidus: readonly SectionPoint[],
+  engine: Engine,
+): SectionBoundary[] => {
   const points: SectionPoint[] = [];
   const lines: SectionPoint[][] = [points];
   for (const { x, temperatureC } of solidus) {

@@ -8,6 +8,10 @@ const MAX_STEPS = 120;
 const AGREEMENT = 1e-9;
 /** A phase holding less of the whole than this, and shrinking, is removed. */
 const VANISHING = 1e-11;
+/** A step that leaves a phase less than this share of itself means to use it up. */
+const REMNANT = 0.02;
+/** Rounding in the whole energy, J. */
+const NO_RISE = 1e-8;
 
 /** Shares a fixed amount of each element between given phases at least Gibbs energy, by damped Newton steps on the amounts. */
 export class Split {
@@ -163,8 +167,9 @@ export class Split {
     const { system, matrix, step, gradient, curvature, main, full } = this;
     const { n } = system;
     const dims = (this.count - 1) * n;
-    for (let p = 0; p < this.count; p++) system.curvature(this.phase[p]!, this.x, p * n, curvature, p * n * n);
-    for (let shift = 0; ; shift = shift === 0 ? 1e-3 : shift * 10) {
+    for (let p = 0; p < this.count; p++)
+      system.curvature(this.phase[p]!, this.x, p * n, curvature, p * n * n);
+    for (let shift = 0; ; shift = shift === 0 ? 1e-11 : shift * 100) {
       this.fillMatrix(dims, shift);
       if (factorise(matrix, dims) || shift > 1e8) break;
     }
@@ -203,30 +208,48 @@ export class Split {
     }
   }
 
-  /** Removes a phase whose matter is all but gone and still leaving. */
+  /** Removes a phase that the step would use up, following the step just so far; says whether one went. */
   private vanish(): boolean {
     const { n } = this.system;
     for (let p = 0; p < this.count; p++) {
-      if (p === this.main || this.total[p]! > VANISHING) continue;
       let change = 0;
       for (let i = 0; i < n; i++) change += this.full[p * n + i]!;
-      if (change < 0) {
-        this.remove(p);
-        return true;
-      }
+      const usedUp = change < 0 && this.total[p]! + change < REMNANT * this.total[p]!;
+      const gone = change < 0 && this.total[p]! < VANISHING;
+      if ((usedUp || gone) && this.removeAlong(p, Math.min(1, -this.total[p]! / change))) return true;
     }
     return false;
   }
 
-  /** Gives the matter of phase `p` to the main phase and forgets it. */
-  remove(p: number): void {
+  /** Takes the step as far as `reach`, where phase `p` runs out, and forgets the phase; undone if the energy would rise. */
+  private removeAlong(p: number, reach: number): boolean {
+    const { amounts, full, saved } = this;
     const { n } = this.system;
-    for (let i = 0; i < n; i++) this.amounts[this.main * n + i]! += this.amounts[p * n + i]!;
+    const length = this.count * n;
+    saved.set(amounts);
+    const before = this.energy;
+    let receiver = -1;
+    for (let q = 0; q < this.count; q++) {
+      if (q !== p && (receiver < 0 || this.total[q]! > this.total[receiver]!)) receiver = q;
+    }
+    for (let k = 0; k < length; k++) amounts[k] = saved[k]! + reach * full[k]!;
+    for (let i = 0; i < n; i++) amounts[receiver * n + i]! += amounts[p * n + i]!;
     const last = this.count - 1;
-    for (let i = 0; i < n; i++) this.amounts[p * n + i] = this.amounts[last * n + i]!;
-    this.phase[p] = this.phase[last]!;
-    this.count--;
+    const phase = this.phase[p]!;
+    let positive = true;
+    for (let k = 0; k < length; k++) positive &&= amounts[k]! > 0 || (k >= p * n && k < p * n + n);
+    if (positive) {
+      for (let i = 0; i < n; i++) amounts[p * n + i] = amounts[last * n + i]!;
+      this.phase[p] = this.phase[last]!;
+      this.count--;
+      this.energy = this.evaluate();
+      if (this.energy <= before + NO_RISE) return true;
+      this.count++;
+      this.phase[p] = phase;
+    }
+    amounts.set(saved);
     this.energy = this.evaluate();
+    return false;
   }
 
   private advance(disagreement: number): boolean {

@@ -1,5 +1,5 @@
 import { LatticeStability } from './lattice-stability.ts';
-import { FCC, GAS_CONSTANT, LIQUID, MODEL_ELEMENTS, type Linear, type ModelParameters } from './model.ts';
+import { FCC, GAS_CONSTANT, LIQUID, type Linear, type ModelParameters } from './model.ts';
 import type { ElementSymbol } from './types.ts';
 
 const MAX_ORDER = 4;
@@ -136,7 +136,16 @@ export class System {
 
   /** Chemical potentials into `mu[muAt…]`; returns the molar Gibbs energy. */
   potentials(phase: number, x: Float64Array, at: number, mu: Float64Array, muAt: number): number {
-    return this.fillPotentials(x, at, mu, muAt, this.pure[phase]!, this.pairs[phase]!, this.triples[phase]!, this.rt);
+    return this.fillPotentials(
+      x,
+      at,
+      mu,
+      muAt,
+      this.pure[phase]!,
+      this.pairs[phase]!,
+      this.triples[phase]!,
+      this.rt,
+    );
   }
 
   /** The slopes of the chemical potentials with temperature, minus the partial entropies, J/(mol K); returns minus the molar entropy. */
@@ -328,7 +337,3 @@ const addCross = (hess: Float64Array, n: number, i: number, j: number, value: nu
 const scale = (out: Float64Array, base: Float64Array, slope: Float64Array, t: number): void => {
   for (let k = 0; k < out.length; k++) out[k] = base[k]! + t * slope[k]!;
 };
-
-/** The elements of `MODEL_ELEMENTS` whose amount is above nothing, in the model's order. */
-export const presentElements = (has: (element: ElementSymbol) => boolean): readonly ElementSymbol[] =>
-  MODEL_ELEMENTS.filter(has);

@@ -13,5 +13,9 @@ export interface ParameterSource {
 /** The source of every parameter the engine uses. */
 export const PROVENANCE: readonly ParameterSource[] = [
   { what: 'Pure elements: liquid against fcc', basis: 'published', source: COMMITTED.liquidOverFccSource },
-  ...COMMITTED.interactions.map(({ elements, basis, source }) => ({ what: elements.join('-'), basis, source })),
+  ...COMMITTED.interactions.map(({ elements, basis, source }) => ({
+    what: elements.join('-'),
+    basis,
+    source,
+  })),
 ];

@@ -28,9 +28,14 @@ const leastMs = (calls: number, call: (k: number) => unknown): number => {
 const draws = (alloy: Composition): readonly (readonly [Composition, number])[] => {
   const random = randomStream(1);
   return Array.from({ length: DRAWS }, () => {
-    const parts = Object.entries(alloy).map(([element, wt]) => [element, wt * (0.7 + 0.6 * random())] as const);
+    const parts = Object.entries(alloy).map(
+      ([element, wt]) => [element, wt * (0.7 + 0.6 * random())] as const,
+    );
     const sum = parts.reduce((total, [, part]) => total + part, 0);
-    return [Object.fromEntries(parts.map(([element, part]) => [element, (100 * part) / sum])), 550 + 500 * random()];
+    return [
+      Object.fromEntries(parts.map(([element, part]) => [element, (100 * part) / sum])),
+      550 + 500 * random(),
+    ];
   });
 };
 
@@ -40,7 +45,10 @@ const equilibriumUs = (alloy: Composition): number => {
 };
 
 const pathsMs = (alloy: Composition, stepC: number): number =>
-  leastMs(20, () => [freezingPath(alloy, { rule: 'lever', stepC }), freezingPath(alloy, { rule: 'scheil', stepC })]);
+  leastMs(20, () => [
+    freezingPath(alloy, { rule: 'lever', stepC }),
+    freezingPath(alloy, { rule: 'scheil', stepC }),
+  ]);
 
 const rounded = (figures: Readonly<Record<string, number>>): Record<string, number> =>
   Object.fromEntries(Object.entries(figures).map(([key, value]) => [key, Number(value.toPrecision(3))]));

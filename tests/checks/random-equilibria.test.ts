@@ -38,7 +38,8 @@ it('answers or refuses any composition and temperature', { timeout: 60_000 }, ()
     const state = equilibrium(composition, 150 + 1400 * random());
     if (!state.withinModel) {
       seen.refused++;
-      if (state.reason.length < 10 || state.code === 'outside-model') throw new Error(JSON.stringify({ composition, state }));
+      if (state.reason.length < 10 || state.code === 'outside-model')
+        throw new Error(JSON.stringify({ composition, state }));
       continue;
     }
     seen.answered++;
@@ -46,7 +47,9 @@ it('answers or refuses any composition and temperature', { timeout: 60_000 }, ()
     const potential = disagreement(composition);
     const balance = imbalance(composition, state);
     if (!(potential < 1e-6) || !(balance < 1e-12)) {
-      throw new Error(JSON.stringify({ composition, potential, balance, temperatureC: state.temperatureC, state }));
+      throw new Error(
+        JSON.stringify({ composition, potential, balance, temperatureC: state.temperatureC, state }),
+      );
     }
     worstPotential = Math.max(worstPotential, potential);
     worstBalance = Math.max(worstBalance, balance);

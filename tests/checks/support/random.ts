@@ -1,6 +1,6 @@
 /** A repeatable stream of numbers in [0, 1) (the mulberry32 generator). */
-export const randomStream = (seed: number): (() => number) => {
-  let state = seed >>> 0;
+export const randomStream = (start: number): (() => number) => {
+  let state = start >>> 0;
   return () => {
     state = (state + 0x6d2b79f5) >>> 0;
     let t = state;

@@ -1,0 +1,103 @@
+import type { ReactNode } from 'react';
+import type { Melt } from '#shared/contracts/melt.ts';
+import { StateMark } from '#src/ui/state-mark.tsx';
+import { CardFiguresList } from '../../parts/card-figures-list.tsx';
+import { useStudio } from '../../parts/use-studio.ts';
+import { AmendForm } from './amend-form.tsx';
+import { MeltBeamView } from './melt-beam-view.tsx';
+import { AmendmentNote, MeltEvents } from './melt-events.tsx';
+import { MetalAccount } from './metal-account.tsx';
+import { PourSummary } from './pour-summary.tsx';
+import { ReadingsChart } from './readings-chart.tsx';
+
+interface SectionProps {
+  readonly id: string;
+  readonly title: string;
+  readonly children: ReactNode;
+}
+
+const Section = ({ id, title, children }: SectionProps) => (
+  <section aria-labelledby={id} className="grid min-w-0 content-start gap-4 break-inside-avoid">
+    <h2 id={id} className="text-[21px] font-black">
+      {title}
+    </h2>
+    {children}
+  </section>
+);
+
+const Departures = ({ melt }: { readonly melt: Melt }) => {
+  const { clock } = useStudio();
+  const { departures } = melt.state;
+  if (departures.length === 0) return null;
+  return (
+    <section aria-label="Departures from the card" className="mb-8 border-y-[3px] border-ink py-4">
+      <ul className="grid gap-2">
+        {departures.map(({ sentence, at, kind }) => (
+          <li key={`${kind}-${at}`} className="flex flex-wrap items-baseline justify-between gap-x-6">
+            <StateMark state="caution" text={sentence} size="row" />
+            <span className="text-[15px] text-soft">{clock.exactTime(at)}</span>
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+};
+
+const Remarks = ({ melt }: { readonly melt: Melt }) => {
+  const whole = melt.amendments.filter(({ seq }) => seq === null);
+  return (
+    <div className="grid gap-6">
+      {whole.map((amendment) => (
+        <AmendmentNote key={amendment.at} amendment={amendment} />
+      ))}
+      {whole.length === 0 ? <p className="text-soft">No remark on the melt as a whole.</p> : null}
+      {melt.abilities.amend ? <AmendForm melt={melt} /> : null}
+    </div>
+  );
+};
+
+/** The body of a melt's page. */
+export const MeltSections = ({ melt }: { readonly melt: Melt }) => {
+  const { rangeBasis, casting, instructionRevision } = melt;
+  return (
+    <>
+      <Departures melt={melt} />
+      <div className="grid gap-x-14 gap-y-12 xl:grid-cols-[minmax(0,1fr)_400px]">
+        <Section id="readings" title="Readings">
+          <ReadingsChart melt={melt} />
+        </Section>
+        <Section id="beam" title="On the melt beam">
+          <MeltBeamView melt={melt} />
+        </Section>
+        <div className="grid gap-x-14 gap-y-12 md:grid-cols-2 xl:col-span-2">
+          <Section id="metal" title="Metal">
+            <MetalAccount melt={melt} />
+          </Section>
+          <Section id="pour" title="Pour and quench">
+            <PourSummary melt={melt} />
+          </Section>
+        </div>
+        <div className="xl:col-span-2">
+          <Section id="figures" title="The card’s figures">
+            <CardFiguresList
+              figures={melt.context.figures}
+              className="grid grid-cols-[repeat(auto-fill,minmax(190px,1fr))] gap-x-4 gap-y-2 border-y-2 border-line py-3"
+            />
+            <p className="text-soft">
+              Fixed when the card was opened: alloy revision {casting.alloy.revision}, work instruction
+              revision {instructionRevision}, melting range{' '}
+              {rangeBasis === 'computed' ? 'computed' : 'measured, not computed'}. Press a figure to see where
+              it comes from.
+            </p>
+          </Section>
+        </div>
+        <Section id="entries" title="What happened">
+          <MeltEvents melt={melt} />
+        </Section>
+        <Section id="remarks" title="Remarks">
+          <Remarks melt={melt} />
+        </Section>
+      </div>
+    </>
+  );
+};

@@ -1,0 +1,98 @@
+import type { Locator, Page } from 'playwright-core';
+import { demoEnrolmentCode, demoPeople, type DemoPerson } from '#server/services/demo-studio/people.ts';
+
+const holdMs = 1_200;
+
+/** A person of the demo studio by sign-in name. */
+export const demoPerson = (login: string): DemoPerson => {
+  const person = demoPeople.find((candidate) => candidate.login === login);
+  if (!person) throw new Error(`The demo studio has no ${login}.`);
+  return person;
+};
+
+/** Presses a button and keeps it pressed until what it does is done. */
+export const hold = async (page: Page, button: Locator): Promise<void> => {
+  await button.waitFor();
+  const box = await button.boundingBox();
+  if (!box) throw new Error('The button to hold has no place on the page.');
+  await page.mouse.move(box.x + box.width / 2, box.y + box.height / 2);
+  await page.mouse.down();
+  await page.waitForTimeout(holdMs);
+  await page.mouse.up();
+};
+
+/** Drives the terminal as a person would, by what its screens say. */
+export const driveTerminal = (page: Page, origin: string) => {
+  const button = (name: string | RegExp): Locator => page.getByRole('button', { name });
+  const type = (text: string): Promise<void> => page.keyboard.type(text, { delay: 60 });
+  return {
+    page,
+    button,
+    hold: (name: string | RegExp): Promise<void> => hold(page, button(name)),
+    type,
+
+    /** Makes this browser a terminal with the demo studio's one-time code. */
+    enrol: async (): Promise<void> => {
+      await page.goto(`${origin}/kiosk`);
+      await page.getByRole('heading', { name: /not a terminal yet/ }).waitFor();
+      await type(demoEnrolmentCode.replace(/\D/g, ''));
+      await button('Enrol this terminal').click();
+      await page.getByRole('heading', { name: /who/i }).waitFor();
+    },
+
+    /** Chooses a person and types the PIN; whatever address was open comes back. */
+    signIn: async (login: string): Promise<void> => {
+      const { name, pin } = demoPerson(login);
+      await button(new RegExp(name)).click();
+      await page.getByRole('group', { name: `PIN of ${name}` }).waitFor();
+      await type(pin);
+      await button('Sign in').click();
+      await page.getByRole('group', { name: `PIN of ${name}` }).waitFor({ state: 'detached' });
+    },
+
+    /** Types a flask's digits as a scanner does: fast, ending in Enter. */
+    scanWithWedge: async (code: string): Promise<void> => {
+      await page.keyboard.type(code, { delay: 5 });
+      await page.keyboard.press('Enter');
+    },
+
+    /** Touches every caution, then holds. */
+    guard: async (): Promise<void> => {
+      const cautions = page.getByRole('group', { name: 'Cautions' }).getByRole('button');
+      await cautions.first().waitFor();
+      for (const caution of await cautions.all()) await caution.click();
+      await hold(page, button(/Guarded/));
+    },
+
+    /** Weighs in one kind of metal, as typed. */
+    weighIn: async (kind: 'Returns' | 'Grain', typed: string): Promise<void> => {
+      await button(`${kind} in`).click();
+      await page.getByRole('heading', { name: /How much/ }).waitFor();
+      await type(typed);
+      await button(/^Put in/).click();
+    },
+
+    /** Types a melt temperature and takes it. */
+    read: async (typed: string): Promise<void> => {
+      await button('Type a reading').click();
+      await page.getByRole('heading', { name: /pyrometer/ }).waitFor();
+      await type(typed);
+      await button(new RegExp(`^Take ${typed}`)).click();
+    },
+
+    /** Button, loss and look, then holds to close. */
+    close: async (buttonMass: string, loss: string): Promise<void> => {
+      await page.getByRole('group', { name: 'What the pad types' }).waitFor();
+      await type(buttonMass);
+      await page.keyboard.press('Enter');
+      await type(loss);
+      await page.getByRole('group', { name: 'Look of the casting' }).getByRole('button').first().click();
+      await hold(page, button('Hold to close the card'));
+    },
+
+    heading: (name: RegExp): Locator => page.getByRole('heading', { level: 1, name }),
+  };
+};
+
+/** A terminal being driven. */
+export type TerminalDriver = ReturnType<typeof driveTerminal>;
