@@ -55,49 +55,59 @@ const receivedBefore = async ({ models }: Services, key: string): Promise<Lot | 
   return models.Lot.findByPk(movement.lotId, { rejectOnEmpty: true });
 };
 
-/** Takes a lot in: its label, and its metal as a movement from the supplier; a second delivery of one key takes in nothing. */
-export const receiveLot = (services: Services, { person }: SignedIn, request: ReceiveLot): Promise<Lot> =>
-  services.sequelize.transaction(async () => {
-    const before = await receivedBefore(services, request.key);
-    if (before) return before;
-    refuseOdd(request, await loadAlloy(services, request.alloyRevisionId), services.now());
-    const massMg = toMilligrams(request.massG);
-    if (massMg < 1) throw fieldError('massG', 'That is less than a milligram.');
-    const lot = await services.models.Lot.create({
-      ...(await nextLotCode(services)),
-      name: request.name,
-      kind: request.kind,
-      alloyRevisionId: request.alloyRevisionId,
-      meltId: null,
-      compositionWt: request.compositionWt,
-      toleranceWt: request.toleranceWt,
-      supplier: request.supplier,
-      supplierReference: request.supplierReference,
-      place: request.place,
-      receivedMg: massMg,
-      receivedAt: new Date(request.receivedAt),
-      receivedBy: person.id,
+/**
+ * Takes a lot in: its label, and its metal as a movement from the supplier; a second delivery of one key takes in nothing.
+ * Joins the caller's transaction.
+ */
+export const takeLotIn = async (
+  services: Services,
+  { person }: SignedIn,
+  request: ReceiveLot,
+): Promise<Lot> => {
+  const before = await receivedBefore(services, request.key);
+  if (before) return before;
+  refuseOdd(request, await loadAlloy(services, request.alloyRevisionId), services.now());
+  const massMg = toMilligrams(request.massG);
+  if (massMg < 1) throw fieldError('massG', 'That is less than a milligram.');
+  const lot = await services.models.Lot.create({
+    ...(await nextLotCode(services)),
+    name: request.name,
+    kind: request.kind,
+    alloyRevisionId: request.alloyRevisionId,
+    meltId: null,
+    compositionWt: request.compositionWt,
+    toleranceWt: request.toleranceWt,
+    supplier: request.supplier,
+    supplierReference: request.supplierReference,
+    place: request.place,
+    receivedMg: massMg,
+    receivedAt: new Date(request.receivedAt),
+    receivedBy: person.id,
+    createdAt: services.now(),
+  });
+  await writeMovement(services, {
+    key: request.key,
+    kind: 'received',
+    from: 'supplier',
+    to: storeOf(lot.kind),
+    massMg,
+    contentsMg: contentsOf(massMg, lot.compositionWt),
+    lot,
+    userId: person.id,
+    occurredAt: lot.receivedAt,
+  });
+  if (request.quarantineReason !== '') {
+    await services.models.LotAmendment.create({
+      lotId: lot.id,
+      kind: 'quarantined',
+      reason: request.quarantineReason,
+      userId: person.id,
       createdAt: services.now(),
     });
-    await writeMovement(services, {
-      key: request.key,
-      kind: 'received',
-      from: 'supplier',
-      to: storeOf(lot.kind),
-      massMg,
-      contentsMg: contentsOf(massMg, lot.compositionWt),
-      lot,
-      userId: person.id,
-      occurredAt: lot.receivedAt,
-    });
-    if (request.quarantineReason !== '') {
-      await services.models.LotAmendment.create({
-        lotId: lot.id,
-        kind: 'quarantined',
-        reason: request.quarantineReason,
-        userId: person.id,
-        createdAt: services.now(),
-      });
-    }
-    return lot.reload();
-  });
+  }
+  return lot.reload();
+};
+
+/** Takes a lot in. */
+export const receiveLot = (services: Services, actor: SignedIn, request: ReceiveLot): Promise<Lot> =>
+  services.sequelize.transaction(() => takeLotIn(services, actor, request));

@@ -6,9 +6,12 @@ import type { Route } from './define-route.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
 import { ledgerRoutes } from './ledger.ts';
+import { lotDocumentRoutes } from './lot-documents.ts';
+import { lotIntakeRoutes } from './lot-intake.ts';
 import { lotRoutes } from './lots.ts';
 import { meltRoutes } from './melts.ts';
 import { peopleRoutes } from './people.ts';
+import { reconciliationRoutes } from './reconciliation.ts';
 import { sessionRoutes } from './sessions.ts';
 import { studioRoutes } from './studio.ts';
 import { terminalRoutes } from './terminals.ts';
@@ -26,6 +29,9 @@ export const routes: readonly Route[] = [
   ...cardRoutes,
   ...meltRoutes,
   ...lotRoutes,
+  ...lotDocumentRoutes,
+  ...lotIntakeRoutes,
   ...ledgerRoutes,
   ...chargeRoutes,
+  ...reconciliationRoutes,
 ];

@@ -1,5 +1,7 @@
 /** Where a set of marks applies. */
-export type MarkPlace = 'ISO 9202' | 'United Kingdom' | 'United States';
+export const markPlaces = ['ISO 9202', 'United Kingdom', 'United States'] as const;
+/** One such place. */
+export type MarkPlace = (typeof markPlaces)[number];
 
 /** One fineness a finished article may be marked with. */
 export interface FinenessMark {
