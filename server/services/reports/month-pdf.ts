@@ -7,15 +7,29 @@ type Page = InstanceType<typeof PDFDocument>;
 const margin = 48;
 const body = { font: 'Helvetica', size: 8.5 };
 
+/** Letters that no decomposition takes the bar off. */
+const barred: Readonly<Record<string, string>> = { Ł: 'L', ł: 'l', Đ: 'D', đ: 'd', Ħ: 'H', ħ: 'h', ı: 'i' };
+
 /** The standard fonts know Western European letters; others are written without their marks, or as a question mark. */
 const writable = (text: string): string =>
   [...text]
     .map((letter) => {
       if (letter.charCodeAt(0) < 256) return letter;
-      const plain = letter.normalize('NFD').charAt(0);
+      const plain = barred[letter] ?? letter.normalize('NFD').charAt(0);
       return plain.charCodeAt(0) < 256 ? plain : '?';
     })
     .join('');
+
+const isFigure = (text: string | undefined): boolean => /^-?\d+(\.\d+)?$/.test(text ?? '');
+
+/** A column of figures stands flush right, its heading too. */
+const alignOf = (rows: readonly (readonly string[])[], column: number) => ({
+  x:
+    rows.length > 1 && column > 0 && rows.slice(1).every((row) => isFigure(row[column]))
+      ? ('right' as const)
+      : ('left' as const),
+  y: 'top' as const,
+});
 
 const table = (page: Page, rows: readonly (readonly string[])[], widths: readonly number[]): void => {
   page.font(body.font).fontSize(body.size);
@@ -25,10 +39,7 @@ const table = (page: Page, rows: readonly (readonly string[])[], widths: readonl
     data: rows.map((row, index) =>
       row.map((text, column) => ({
         text: writable(text),
-        align:
-          column > 0 && /^-?[\d.]*$/.test(rows[index]?.[column] ?? '')
-            ? { x: 'right' as const, y: 'top' as const }
-            : { x: 'left' as const, y: 'top' as const },
+        align: alignOf(rows, column),
         ...(index === 0 ? { font: { src: 'Helvetica-Bold' } } : {}),
       })),
     ),
