@@ -1,3 +1,4 @@
+import { join } from 'node:path';
 import express, { type Express, type RequestHandler } from 'express';
 import type { Sequelize } from 'sequelize';
 import type { Environment } from './environment.ts';
@@ -13,6 +14,7 @@ import { initModels } from './models/index.ts';
 import { healthRoutes } from './routes/health.ts';
 import { routes } from './routes/index.ts';
 import { mountRoute } from './routes/mount-route.ts';
+import { createFileStore } from './services/files/file-store.ts';
 import type { Logger } from './services/logger.ts';
 import { createMailer } from './services/mailer.ts';
 import type { Secrets } from './services/secrets.ts';
@@ -47,6 +49,7 @@ export const createApp = (deps: AppDeps): App => {
     secrets,
     mailer: createMailer(environment.smtpUrl, logger),
     logger,
+    files: createFileStore(join(environment.dataDir, 'files')),
     now,
   };
   const sessions = createSessions(databaseUrl, secrets.sessionSecret);

@@ -8,6 +8,7 @@ import type { Melt } from '../models/melt.ts';
 import type { MeltEvent } from '../models/melt-event.ts';
 import type { AtTerminal } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
+import { moveMetalAlong } from './move-metal-along.ts';
 import { occurredBetween } from './occurred-between.ts';
 import { writeCastingState } from './write-casting-state.ts';
 
@@ -94,6 +95,7 @@ export const appendEvent = async (
     });
   }
   await melt.update({ state: applied.value, overAt: isOver(applied.value) ? occurredAt : null });
+  await moveMetalAlong(services, actor, melt, recorded);
   await moveCastingAlong(services, actor, melt, event);
   return recorded;
 };

@@ -12,6 +12,7 @@ import { can } from '../policies/policy.ts';
 import type { Services } from '../services/services.ts';
 import { appendEvent, keyUsed } from './append-event.ts';
 import { lockRow } from './lock-row.ts';
+import { withCertificate } from './with-certificate.ts';
 
 type RecordEvent = z.output<typeof recordEventRequest>;
 
@@ -44,6 +45,10 @@ const judged = (melt: Melt, event: CardEvent): CardEvent => {
   return { ...event, confirmed: verdict.kind === 'question' };
 };
 
+/** A certificate may be amended between two deliveries of one weighing: they are the same all the same. */
+const withoutCertificate = (event: CardEvent): object =>
+  'lot' in event && event.lot ? { ...event, lot: event.lot.id } : event;
+
 /** An event that was delivered before: the one on record, refused when the key was used for something else. */
 const alreadyRecorded = async (
   { models }: Services,
@@ -53,7 +58,8 @@ const alreadyRecorded = async (
 ): Promise<MeltEvent | null> => {
   const recorded = await models.MeltEvent.findOne({ where: { key } });
   if (!recorded) return null;
-  if (recorded.meltId === melt.id && isDeepStrictEqual(recorded.event, event)) return recorded;
+  const isSame = isDeepStrictEqual(withoutCertificate(recorded.event), withoutCertificate(event));
+  if (recorded.meltId === melt.id && isSame) return recorded;
   throw keyUsed();
 };
 
@@ -75,8 +81,8 @@ export const recordEvent = (
 ): Promise<MeltEvent> =>
   services.sequelize.transaction(async () => {
     const melt = await lockMelt(services, meltId);
-    const event = judged(melt, request.event);
-    const recorded = await alreadyRecorded(services, melt, request.key, event);
+    const reported = judged(melt, request.event);
+    const recorded = await alreadyRecorded(services, melt, request.key, reported);
     if (recorded) return recorded;
     if (!can(meltPolicy.record, actor, melt)) {
       throw new AppError(
@@ -84,7 +90,8 @@ export const recordEvent = (
         'This card went on at another terminal meanwhile. Scan the flask to see who has it.',
       );
     }
-    refuseUndecided(actor, melt, event);
-    await refuseUnguarded(services, melt, event);
+    refuseUndecided(actor, melt, reported);
+    await refuseUnguarded(services, melt, reported);
+    const event = await withCertificate(services, reported);
     return appendEvent(services, actor, melt, { ...request, event });
   });

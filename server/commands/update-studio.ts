@@ -7,7 +7,7 @@ import type { Services } from '../services/services.ts';
 /** Stores the studio's settings, unless someone else stored others since they were read. */
 export const updateStudio = (
   services: Services,
-  { version, ...settings }: UpdateStudioRequest,
+  { version, marksPlace, ...settings }: UpdateStudioRequest,
 ): Promise<StudioSettings> =>
   services.sequelize.transaction(async () => {
     const studio = await loadStudio(services, { lock: true });
@@ -17,5 +17,9 @@ export const updateStudio = (
         'Someone else changed the settings meanwhile. Load them again, then make your change.',
       );
     }
-    return studio.update({ ...settings, version: version + 1 });
+    return studio.update({
+      ...settings,
+      marksPlace: marksPlace ?? studio.marksPlace,
+      version: version + 1,
+    });
   });

@@ -3,17 +3,44 @@ import { Alloy } from './alloy.ts';
 import { AlloyRevision } from './alloy-revision.ts';
 import { Casting } from './casting.ts';
 import { CastingMove } from './casting-move.ts';
+import { ChargePlan } from './charge-plan.ts';
+import { Crucible } from './crucible.ts';
 import { Flask } from './flask.ts';
+import { Lot } from './lot.ts';
+import { LotAmendment } from './lot-amendment.ts';
+import { LotDocument } from './lot-document.ts';
 import { MeltAmendment } from './melt-amendment.ts';
 import { MeltEvent } from './melt-event.ts';
 import { Melt } from './melt.ts';
+import { MetalMovement } from './metal-movement.ts';
 import { Reading } from './reading.ts';
+import { StockCount } from './stock-count.ts';
 import { StudioSettings } from './studio-settings.ts';
 import { TerminalEnrolment } from './terminal-enrolment.ts';
 import { Terminal } from './terminal.ts';
 import { Tree } from './tree.ts';
 import { User } from './user.ts';
 import { WorkInstructionRevision } from './work-instruction-revision.ts';
+
+const associateMetal = (): void => {
+  Lot.hasMany(LotAmendment, { as: 'amendments', foreignKey: 'lotId' });
+  Lot.hasMany(LotDocument, { as: 'documents', foreignKey: 'lotId' });
+  Lot.belongsTo(AlloyRevision, { as: 'alloyRevision', foreignKey: 'alloyRevisionId' });
+  Lot.belongsTo(Melt, { as: 'melt', foreignKey: 'meltId' });
+  Lot.belongsTo(User, { as: 'receiver', foreignKey: 'receivedBy' });
+  LotAmendment.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  LotDocument.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+
+  MetalMovement.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  MetalMovement.belongsTo(User, { as: 'countersigner', foreignKey: 'countersignedBy' });
+  MetalMovement.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
+  MetalMovement.belongsTo(Lot, { as: 'lot', foreignKey: 'lotId' });
+  MetalMovement.belongsTo(Melt, { as: 'melt', foreignKey: 'meltId' });
+
+  StockCount.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  StockCount.belongsTo(Lot, { as: 'lot', foreignKey: 'lotId' });
+  ChargePlan.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+};
 
 const associate = (): void => {
   Alloy.hasMany(AlloyRevision, { as: 'revisions', foreignKey: 'alloyId' });
@@ -51,11 +78,18 @@ const classes = {
   AlloyRevision,
   Casting,
   CastingMove,
+  ChargePlan,
+  Crucible,
   Flask,
+  Lot,
+  LotAmendment,
+  LotDocument,
   Melt,
   MeltAmendment,
   MeltEvent,
+  MetalMovement,
   Reading,
+  StockCount,
   StudioSettings,
   Terminal,
   TerminalEnrolment,
@@ -71,5 +105,6 @@ export type Models = typeof classes;
 export const initModels = (sequelize: Sequelize): Models => {
   for (const model of Object.values(classes)) model.define(sequelize);
   associate();
+  associateMetal();
   return classes;
 };

@@ -6,6 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
+import type { MarkPlace } from '#shared/domain/metal/fineness-marks.ts';
 import type { ProcessTables } from '#shared/domain/studio/process-tables.ts';
 import type { StudioLimits } from '#shared/domain/studio/studio-limits.ts';
 import type { MassUnit, TemperatureUnit } from '#shared/lib/units.ts';
@@ -24,6 +25,7 @@ export class StudioSettings extends Model<
   declare idleLockS: number;
   declare processTables: ProcessTables;
   declare limits: StudioLimits;
+  declare marksPlace: CreationOptional<MarkPlace>;
 
   static define(sequelize: Sequelize): typeof StudioSettings {
     return StudioSettings.init(
@@ -37,6 +39,7 @@ export class StudioSettings extends Model<
         idleLockS: { type: DataTypes.INTEGER, allowNull: false },
         processTables: { type: DataTypes.JSONB, allowNull: false },
         limits: { type: DataTypes.JSONB, allowNull: false },
+        marksPlace: { type: DataTypes.TEXT, allowNull: false, defaultValue: 'ISO 9202' },
       },
       { sequelize, tableName: 'studio_settings' },
     );

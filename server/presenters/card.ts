@@ -5,6 +5,7 @@ import { meltPolicy } from '../policies/melt.ts';
 import { can } from '../policies/policy.ts';
 import type { LoadedCard } from '../queries/load-card.ts';
 import type { LoadedEvent } from '../queries/load-melt.ts';
+import { presentChargePlan } from './charge.ts';
 import { presentCasting } from './casting.ts';
 
 /** An event of the melt book. */
@@ -20,7 +21,7 @@ export const presentMeltEvent = (event: LoadedEvent): MeltEventContract => ({
 
 /** Everything a terminal shows for one flask. */
 export const presentCard = (card: LoadedCard, actor: Actor, now: Date): PourCard => {
-  const { casting, context, instruction, melt, events } = card;
+  const { casting, context, instruction, melt, events, chargePlan } = card;
   return {
     casting: presentCasting(casting, actor),
     compositionWt: casting.alloyRevision.compositionWt,
@@ -31,6 +32,7 @@ export const presentCard = (card: LoadedCard, actor: Actor, now: Date): PourCard
       ? { id: melt.id, code: melt.code, openedBy: melt.opener.name, terminal: melt.terminal.name }
       : null,
     events: events.map(presentMeltEvent),
+    chargePlan: chargePlan && presentChargePlan(chargePlan, actor),
     abilities: {
       open: can(castingPolicy.openCard, actor, casting),
       record: melt !== null && can(meltPolicy.record, actor, melt),

@@ -14,5 +14,6 @@ export const presentStudio = (studio: StudioSettings, actor: Actor): Studio => (
   idleLockS: studio.idleLockS,
   processTables: studio.processTables,
   limits: studio.limits,
+  marksPlace: studio.marksPlace,
   abilities: { update: can(studioPolicy.update, actor, undefined) },
 });

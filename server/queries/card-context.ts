@@ -1,7 +1,21 @@
+import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
 import { computeCardFigures } from '#shared/domain/pour-card/card-figures.ts';
-import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import type { CardContext, ChargeAlloy } from '#shared/domain/pour-card/card-state.ts';
 import type { StudioSettings } from '../models/studio-settings.ts';
 import type { LoadedCasting } from './load-casting.ts';
+
+/** What the metal of a charge of this alloy must come to. */
+export const chargeAlloyOf = ({
+  compositionWt,
+  toleranceWt,
+  fineness,
+  alloy,
+}: LoadedCasting['alloyRevision']): ChargeAlloy => ({
+  compositionWt,
+  toleranceWt,
+  markedMetal: markedMetal(alloy.family),
+  markPpt: fineness,
+});
 
 /** What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables. */
 export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): CardContext => {
@@ -20,6 +34,7 @@ export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): C
     }),
     limits: studio.limits,
     plannedMetalG: casting.plannedMetalG,
+    alloy: chargeAlloyOf(alloyRevision),
     units: { temperature: studio.temperatureUnit, mass: studio.massUnit },
   };
 };

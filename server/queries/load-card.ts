@@ -3,6 +3,7 @@ import type { WorkInstructionRevision } from '../models/work-instruction-revisio
 import type { Services } from '../services/services.ts';
 import { cardContextOf } from './card-context.ts';
 import type { LoadedCasting } from './load-casting.ts';
+import { loadChargePlan, type LoadedChargePlan } from './load-charge-plan.ts';
 import { loadInstruction } from './load-instruction.ts';
 import { loadMelt, type ListedMelt, type LoadedEvent } from './load-melt.ts';
 import { loadStudio } from './load-studio.ts';
@@ -14,16 +15,25 @@ export interface LoadedCard {
   readonly instruction: WorkInstructionRevision;
   readonly melt: ListedMelt | null;
   readonly events: readonly LoadedEvent[];
+  readonly chargePlan: LoadedChargePlan | null;
 }
 
 /** Loads a casting's card: a running one keeps the context and instruction it began with, a new one has today's. */
 export const loadCard = async (services: Services, casting: LoadedCasting): Promise<LoadedCard> => {
+  const chargePlan = await loadChargePlan(services, casting.id);
   const running = casting.melt !== null && (casting.melt.overAt === null || casting.state !== 'holding');
   if (casting.melt && running) {
     const melt = await loadMelt(services, casting.melt.id);
     const { context, workInstructionRevision, events } = melt;
-    return { casting, context, instruction: workInstructionRevision, melt, events };
+    return { casting, context, instruction: workInstructionRevision, melt, events, chargePlan };
   }
   const [studio, instruction] = await Promise.all([loadStudio(services), loadInstruction(services)]);
-  return { casting, context: cardContextOf(casting, studio), instruction, melt: null, events: [] };
+  return {
+    casting,
+    context: cardContextOf(casting, studio),
+    instruction,
+    melt: null,
+    events: [],
+    chargePlan,
+  };
 };

@@ -1,11 +1,17 @@
 import { alloyRoutes } from './alloys.ts';
 import { cardRoutes } from './cards.ts';
 import { castingRoutes } from './castings.ts';
+import { chargeRoutes } from './charges.ts';
 import type { Route } from './define-route.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
+import { ledgerRoutes } from './ledger.ts';
+import { lotDocumentRoutes } from './lot-documents.ts';
+import { lotIntakeRoutes } from './lot-intake.ts';
+import { lotRoutes } from './lots.ts';
 import { meltRoutes } from './melts.ts';
 import { peopleRoutes } from './people.ts';
+import { reconciliationRoutes } from './reconciliation.ts';
 import { sessionRoutes } from './sessions.ts';
 import { studioRoutes } from './studio.ts';
 import { terminalRoutes } from './terminals.ts';
@@ -22,4 +28,10 @@ export const routes: readonly Route[] = [
   ...castingRoutes,
   ...cardRoutes,
   ...meltRoutes,
+  ...lotRoutes,
+  ...lotDocumentRoutes,
+  ...lotIntakeRoutes,
+  ...ledgerRoutes,
+  ...chargeRoutes,
+  ...reconciliationRoutes,
 ];

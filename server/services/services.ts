@@ -1,5 +1,6 @@
 import type { Sequelize } from 'sequelize';
 import type { Models } from '../models/index.ts';
+import type { FileStore } from './files/file-store.ts';
 import type { Logger } from './logger.ts';
 import type { Mailer } from './mailer.ts';
 import type { Secrets } from './secrets.ts';
@@ -11,6 +12,7 @@ export interface Services {
   readonly secrets: Secrets;
   readonly mailer: Mailer;
   readonly logger: Logger;
+  readonly files: FileStore;
   /** The server's clock; tests set it. */
   readonly now: () => Date;
 }

@@ -3,13 +3,35 @@ import { castLooks, chargeKinds, stopReasons, type CardEvent } from '#shared/dom
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
 import type { WorkInstruction } from '#shared/domain/pour-card/work-instruction.ts';
 import type { Casting } from './casting.ts';
+import { lotKinds } from '#shared/domain/metal/lot.ts';
+import type { SavedChargePlan } from './charge.ts';
 import { instant, massG, massOrNoneG, optionalWords, temperatureC, words, type Abilities } from './common.ts';
+import { lotCompositionWt, lotToleranceWt } from './lot.ts';
+
+/** The lot metal is taken from, as the terminal knows it; the server writes down what its own records say. */
+const chargeLot = z.object({
+  id: z.uuid(),
+  code: z.string().max(20),
+  kind: z.enum(lotKinds),
+  compositionWt: lotCompositionWt,
+  toleranceWt: lotToleranceWt,
+});
 
 /** What may be sent from a terminal to the melt book. */
 export const cardEvent = z.discriminatedUnion('type', [
   z.object({ type: z.literal('guard-confirmed'), prompts: z.array(z.string().max(60)).max(30) }),
-  z.object({ type: z.literal('charge-weighed'), kind: z.enum(chargeKinds), massG }),
-  z.object({ type: z.literal('charge-taken-out'), kind: z.enum(chargeKinds), massG }),
+  z.object({
+    type: z.literal('charge-weighed'),
+    kind: z.enum(chargeKinds),
+    massG,
+    lot: chargeLot.optional(),
+  }),
+  z.object({
+    type: z.literal('charge-taken-out'),
+    kind: z.enum(chargeKinds),
+    massG,
+    lot: chargeLot.optional(),
+  }),
   z.object({ type: z.literal('charge-closed') }),
   z.object({ type: z.literal('reading-taken'), temperatureC, confirmed: z.boolean().default(false) }),
   z.object({ type: z.literal('melt-ready') }),
@@ -72,6 +94,8 @@ export interface PourCard {
     readonly terminal: string;
   } | null;
   readonly events: readonly MeltEvent[];
+  /** What to weigh in, where the charge was planned from lots. */
+  readonly chargePlan?: SavedChargePlan | null;
   readonly abilities: Abilities<'open' | 'record'>;
   readonly serverTime: string;
 }

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { markPlaces, type MarkPlace } from '#shared/domain/metal/fineness-marks.ts';
 import type { ProcessTables } from '#shared/domain/studio/process-tables.ts';
 import type { StudioLimits } from '#shared/domain/studio/studio-limits.ts';
 import { words, type Abilities } from './common.ts';
@@ -78,13 +79,16 @@ export const updateStudioRequest = z.object({
   idleLockS: z.int().min(30, 'At least 30 seconds.').max(3600, 'At most an hour.'),
   processTables,
   limits: studioLimits,
+  /** Whose fineness marks the studio works to; as it was when left out. */
+  marksPlace: z.enum(markPlaces).optional(),
 });
 /** Changes the studio's settings. */
 export type UpdateStudioRequest = z.infer<typeof updateStudioRequest>;
 
 /** The studio's settings. */
-export interface Studio extends Omit<UpdateStudioRequest, 'processTables' | 'limits'> {
+export interface Studio extends Omit<UpdateStudioRequest, 'processTables' | 'limits' | 'marksPlace'> {
   readonly processTables: ProcessTables;
   readonly limits: StudioLimits;
+  readonly marksPlace: MarkPlace;
   readonly abilities: Abilities<'update'>;
 }

@@ -1,5 +1,6 @@
 import { parseArgs } from 'node:util';
 import { benchCards } from './bench-cards.ts';
+import { benchCharge } from './charge.ts';
 import { benchClients } from './bench-clients.ts';
 import { benchEngine } from './engine.ts';
 
@@ -9,6 +10,7 @@ const prefixed = (prefix: string, figures: Record<string, number>): Record<strin
 /** What can be measured, by the name `--only` knows it by. */
 const parts: Readonly<Record<string, () => Promise<Record<string, number>>>> = {
   engine: async () => prefixed('engine', await benchEngine()),
+  charge: async () => prefixed('charge', await benchCharge()),
   clients: benchClients,
   cards: benchCards,
 };

@@ -5,6 +5,7 @@ import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildMelt } from '#tests/factories/build-melt.ts';
 import { buildUser } from '#tests/factories/build-user.ts';
+import { buildMetalTargets } from './metal-request-targets.ts';
 import { START, type Client, type TestServer } from './test-server.ts';
 
 const quench = { earliestS: 900, latestS: null, medium: 'water', why: 'Let it set.', source: 'Test.' };
@@ -58,6 +59,7 @@ export const buildRequestTargets = async (
     pin: '123456',
   };
   return {
+    ...(await buildMetalTargets(server, owner)),
     'post /api/session/desk': {
       path: '/api/session/desk',
       client: server.nobody(),

@@ -1,4 +1,7 @@
+import { mkdtemp, rm } from 'node:fs/promises';
 import { createServer } from 'node:http';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import type { Express } from 'express';
 import request from 'supertest';
 import { expect } from 'vitest';
@@ -60,12 +63,13 @@ const secrets = {
 /** Starts the application with a studio and nobody in it. */
 export const startTestServer = async (): Promise<TestServer> => {
   const database = await createTestDatabase();
+  const dataDir = await mkdtemp(join(tmpdir(), 'ladlemark-files-'));
   const errors: unknown[] = [];
   let clock = Date.parse(START);
   const app = createApp({
     sequelize: database.sequelize,
     databaseUrl: database.url,
-    environment: readEnvironment({}),
+    environment: readEnvironment({ DATA_DIR: dataDir }),
     secrets,
     logger: {
       info: () => {},
@@ -129,6 +133,7 @@ export const startTestServer = async (): Promise<TestServer> => {
       });
       await app.close();
       await database.drop();
+      await rm(dataDir, { recursive: true });
     },
   };
 };

@@ -1,5 +1,5 @@
 import { randomBytes, randomUUID } from 'node:crypto';
-import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
+import type { CardEvent, ChargeKind, ChargeLot } from '#shared/domain/pour-card/card-event.ts';
 import type { CardFigures } from '#shared/domain/pour-card/card-figures.ts';
 import { moveCasting } from '../../commands/move-casting.ts';
 import { openCard } from '../../commands/open-card.ts';
@@ -10,6 +10,7 @@ import type { AtTerminal } from '../../policies/actor.ts';
 import { hashToken } from '../hashing.ts';
 import type { Services } from '../services.ts';
 import type { DemoCasting } from './castings.ts';
+import { lotKey, type SeededLots } from './seed-lots.ts';
 import type { SeededRecords } from './seed-records.ts';
 
 type Past = NonNullable<DemoCasting['past']>;
@@ -19,6 +20,7 @@ const eventsOf = (
   past: Past,
   casting: Casting,
   { liquidusC, pourC, quench }: CardFigures,
+  lotOf: (kind: ChargeKind) => ChargeLot,
 ): readonly (readonly [number, CardEvent])[] => {
   const { plannedMetalG } = casting;
   const returns = Math.round(plannedMetalG * 0.35 * 100) / 100;
@@ -29,10 +31,15 @@ const eventsOf = (
   const quenched = poured + quench.earliestS + 25;
   return [
     [20, { type: 'guard-confirmed', prompts: ['face', 'hands', 'eyes', 'dry', 'air', 'hot'] }],
-    [75, { type: 'charge-weighed', kind: 'returns', massG: returns }],
+    [75, { type: 'charge-weighed', kind: 'returns', massG: returns, lot: lotOf('returns') }],
     [
       130,
-      { type: 'charge-weighed', kind: 'grain', massG: Math.round((plannedMetalG - returns) * 1000) / 1000 },
+      {
+        type: 'charge-weighed',
+        kind: 'grain',
+        massG: Math.round((plannedMetalG - returns) * 1000) / 1000,
+        lot: lotOf('grain'),
+      },
     ],
     [140, { type: 'charge-closed' }],
     [330, { type: 'reading-taken', temperatureC: Math.round(liquidusC - 60), confirmed: false }],
@@ -49,11 +56,23 @@ const eventsOf = (
   ];
 };
 
+const lotsOf =
+  (lots: SeededLots, alloy: string) =>
+  (kind: ChargeKind): ChargeLot => {
+    const lot = lots.get(lotKey(alloy, kind));
+    if (!lot) throw new Error(`The demo studio has no ${kind} of ${alloy}.`);
+    const { id, code, compositionWt, toleranceWt } = lot;
+    return { id, code, kind: lot.kind, compositionWt, toleranceWt };
+  };
+
 const runCard = async (
   services: Services,
   actor: AtTerminal,
-  demo: DemoCasting,
-  casting: Casting,
+  {
+    demo,
+    casting,
+    lots,
+  }: { readonly demo: DemoCasting; readonly casting: Casting; readonly lots: SeededLots },
 ): Promise<void> => {
   if (!demo.past) return;
   const openedMs = casting.plannedPourAt.getTime() - 640_000;
@@ -63,7 +82,8 @@ const runCard = async (
     occurredAt: new Date(openedMs + seconds * 1000).toISOString(),
   });
   const melt = await openCard(at(0), actor, casting.id, { ...stamp(0), carryOn: false });
-  for (const [seconds, event] of eventsOf(demo.past, casting, melt.context.figures)) {
+  const lotOf = lotsOf(lots, demo.alloy);
+  for (const [seconds, event] of eventsOf(demo.past, casting, melt.context.figures, lotOf)) {
     // The contract's arrays are mutable where the domain's are not.
     await recordEvent(at(seconds), actor, melt.id, { ...stamp(seconds), event: event as never });
   }
@@ -73,6 +93,7 @@ const runCard = async (
 export const seedPastMelts = async (
   services: Services,
   { people, castings }: SeededRecords,
+  lots: SeededLots,
 ): Promise<void> => {
   const terminal: Terminal = await services.models.Terminal.create({
     name: 'Old terminal',
@@ -83,7 +104,7 @@ export const seedPastMelts = async (
     const user = demo.past && people.get(demo.past.by);
     if (!user) continue;
     const actor: AtTerminal = { person: user, terminal, via: 'terminal' };
-    await runCard(services, actor, demo, casting);
+    await runCard(services, actor, { demo, casting, lots });
     if (demo.inMinutes > -1000) continue;
     for (const to of ['broken-out', 'cut', 'released'] as const) {
       await moveCasting(services, actor, casting, { to, reason: '' });

@@ -20,6 +20,8 @@ const enrolmentDays = 30;
 /** What was made, for those who go on from here. */
 export interface SeededRecords {
   readonly people: ReadonlyMap<string, User>;
+  /** The approved revision of each alloy, by the alloy's key. */
+  readonly revisions: ReadonlyMap<string, AlloyRevision>;
   readonly castings: readonly (readonly [DemoCasting, Casting])[];
 }
 
@@ -139,5 +141,5 @@ export const seedRecords = async (services: Services): Promise<SeededRecords> =>
     processTables: defaultProcessTables,
     limits: defaultStudioLimits,
   });
-  return { people, castings };
+  return { people, revisions, castings };
 };

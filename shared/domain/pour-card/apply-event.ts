@@ -1,11 +1,13 @@
 import { ok, refuse, type Result } from '#shared/lib/result.ts';
 import { formatMass, formatTemperature } from '#shared/lib/units.ts';
-import type { CardEvent, CardEventType, ChargeKind, TimedCardEvent } from './card-event.ts';
+import type { CardEvent, CardEventType, ChargeWeighing, TimedCardEvent } from './card-event.ts';
 import { chargedG, freshCard, isOver, lastReading, type CardContext, type CardState } from './card-state.ts';
 import { cardStepNames, type CardStep } from './card-step.ts';
+import { changeLots } from './change-lots.ts';
 import * as departures from './departures.ts';
 import { flaskTemperatureAt } from './flask-cooling.ts';
 import { judgeCharge } from './judge-charge.ts';
+import { judgeMetal, sentenceOfMetal } from './judge-metal.ts';
 
 type Applied = Result<CardState>;
 type Handler<Type extends CardEventType> = (
@@ -35,17 +37,25 @@ const allowedOn: Readonly<Partial<Record<CardEventType, readonly CardStep[]>>> =
 
 const roundMass = (grams: number): number => Math.round(grams * 1000) / 1000;
 
-const changeCharge = (state: CardState, kind: ChargeKind, byG: number, { units }: CardContext): Applied => {
-  const massG = roundMass(state.charge[kind] + byG);
+const changeCharge = (
+  state: CardState,
+  { kind, massG: weighedG, lot }: ChargeWeighing,
+  sign: 1 | -1,
+  { units }: CardContext,
+): Applied => {
+  const massG = roundMass(state.charge[kind] + sign * weighedG);
   if (massG < 0) {
     return refuse(
       `Only ${formatMass(state.charge[kind], units.mass)} of ${kind} is in the crucible, so no more can be taken out.`,
     );
   }
-  return ok({ ...state, charge: { ...state.charge, [kind]: massG } });
+  const charged = { ...state, charge: { ...state.charge, [kind]: massG } };
+  if (!lot) return ok(charged);
+  const lots = changeLots(state.lots ?? [], lot, sign * weighedG, units.mass);
+  return lots.ok ? ok({ ...charged, lots: lots.value }) : lots;
 };
 
-const closeCharge: Handler<'charge-closed'> = (state, _event, context) => {
+const closeCharge: Handler<'charge-closed'> = (state, _event, context, at) => {
   const verdict = judgeCharge(state, context);
   const mass = (grams: number): string => formatMass(grams, context.units.mass);
   const wanted = `The charge is ${mass(verdict.totalG)}. The card wants between ${mass(verdict.lowG)} and ${mass(verdict.highG)}`;
@@ -59,8 +69,17 @@ const closeCharge: Handler<'charge-closed'> = (state, _event, context) => {
         `${Math.round(verdict.returnsShare * 100)} % of the charge is returns; the studio allows ${Math.round(context.limits.returnsShare * 100)} %. Take returns out and add grain.`,
       );
     case 'good':
-      return ok({ ...state, step: 'melt' });
+      return closeMetal(state, context, at);
   }
+};
+
+/** A charge by lots is closed only when its fineness holds at the certificates' lower bounds. */
+const closeMetal = (state: CardState, context: CardContext, at: string): Applied => {
+  const metal = judgeMetal(state, context);
+  const refusal = metal && sentenceOfMetal(metal, context);
+  if (refusal) return refuse(refusal);
+  const off = metal ? departures.ofComposition(metal, at) : [];
+  return ok({ ...state, step: 'melt', departures: [...state.departures, ...off] });
 };
 
 const takeReading: Handler<'reading-taken'> = (state, event, context, at) =>
@@ -136,11 +155,15 @@ const close: Handler<'closed'> = (state, event, context, at) => {
     );
   }
   const { buttonMassG, lossMassG, look, note } = event;
+  const found = departures.ofClosing(event, metalIn, context, at);
+  if (state.lots && note === '' && found.some(({ kind }) => kind === 'loss-over-limit')) {
+    return refuse('More is lost than the studio allows. Weigh again, or say in the note where it went.');
+  }
   return ok({
     ...state,
     step: 'done',
     closing: { at, buttonMassG, lossMassG, castMassG, look, note },
-    departures: [...state.departures, ...departures.ofClosing(event, metalIn, context, at)],
+    departures: [...state.departures, ...found],
   });
 };
 
@@ -148,8 +171,8 @@ const handlers: { readonly [Type in CardEventType]: Handler<Type> } = {
   'card-opened': (state) => (state.lastEvent === null ? ok(state) : refuse('This card is already open.')),
   'carried-on': (state) => ok(state),
   'guard-confirmed': (state) => ok({ ...state, step: 'charge' }),
-  'charge-weighed': (state, { kind, massG }, context) => changeCharge(state, kind, massG, context),
-  'charge-taken-out': (state, { kind, massG }, context) => changeCharge(state, kind, -massG, context),
+  'charge-weighed': (state, event, context) => changeCharge(state, event, 1, context),
+  'charge-taken-out': (state, event, context) => changeCharge(state, event, -1, context),
   'charge-closed': closeCharge,
   'reading-taken': takeReading,
   'melt-ready': makeReady,

@@ -1,9 +1,27 @@
 import type { Celsius, Grams } from '#shared/lib/units.ts';
+import type { Assay, LotKind } from '../metal/lot.ts';
 
 /** What is put into the crucible: casting grain of the alloy, or returns of it. */
 export const chargeKinds = ['grain', 'returns'] as const;
 /** One kind of charge. */
 export type ChargeKind = (typeof chargeKinds)[number];
+
+/** The lot a weighing is taken from, as its label and certificate say at that moment. */
+export interface ChargeLot extends Assay {
+  readonly id: string;
+  readonly code: string;
+  readonly kind: LotKind;
+}
+
+/** The kind of charge a lot of metal is: returns, or new metal. */
+export const chargeKindOf = (kind: LotKind): ChargeKind => (kind === 'returns' ? 'returns' : 'grain');
+
+/** Metal put into the crucible or taken out again; of a lot, where the studio keeps lots. */
+export interface ChargeWeighing {
+  readonly kind: ChargeKind;
+  readonly massG: Grams;
+  readonly lot?: ChargeLot | undefined;
+}
 
 /** Why work was stopped. */
 export const stopReasons = ['spill', 'burn', 'equipment', 'other'] as const;
@@ -21,8 +39,8 @@ export type CardEvent =
   /** The same card goes on with another person or at another terminal. */
   | { readonly type: 'carried-on' }
   | { readonly type: 'guard-confirmed'; readonly prompts: readonly string[] }
-  | { readonly type: 'charge-weighed'; readonly kind: ChargeKind; readonly massG: Grams }
-  | { readonly type: 'charge-taken-out'; readonly kind: ChargeKind; readonly massG: Grams }
+  | ({ readonly type: 'charge-weighed' } & ChargeWeighing)
+  | ({ readonly type: 'charge-taken-out' } & ChargeWeighing)
   | { readonly type: 'charge-closed' }
   /** `confirmed` says that a person stood by a doubtful reading. */
   | { readonly type: 'reading-taken'; readonly temperatureC: Celsius; readonly confirmed: boolean }

@@ -1,14 +1,23 @@
 import type { Celsius, Grams, Units } from '#shared/lib/units.ts';
 import type { StudioLimits } from '../studio/studio-limits.ts';
-import type { CardEvent, CastLook, ChargeKind, StopReason } from './card-event.ts';
+import type { Assay } from '../metal/lot.ts';
+import type { CardEvent, CastLook, ChargeKind, ChargeLot, StopReason } from './card-event.ts';
 import type { CardFigures } from './card-figures.ts';
 import type { CardStep } from './card-step.ts';
+
+/** What the metal of a charge must come to: the alloy's parts, and the least of the marked metal, parts per thousand. */
+export interface ChargeAlloy extends Assay {
+  readonly markedMetal: 'Ag' | 'Au';
+  readonly markPpt: number;
+}
 
 /** What a running card is judged against; fixed when the card is opened. */
 export interface CardContext {
   readonly figures: CardFigures;
   readonly limits: StudioLimits;
   readonly plannedMetalG: Grams;
+  /** Cards opened before lots were kept have none. */
+  readonly alloy?: ChargeAlloy;
   /** The units in which sentences are written. */
   readonly units: Units;
 }
@@ -29,6 +38,7 @@ export interface Departure {
     | 'quenched-early'
     | 'quenched-late'
     | 'loss-over-limit'
+    | 'composition-off'
     | 'cast-fault'
     | 'work-stopped';
   readonly sentence: string;
@@ -54,11 +64,18 @@ export interface Closing {
   readonly note: string;
 }
 
+/** What of one lot is in the crucible. */
+export interface ChargedLot extends ChargeLot {
+  readonly massG: Grams;
+}
+
 /** Where a pour card stands: the fold of its events. */
 export interface CardState {
   readonly step: CardStep | 'done' | 'abandoned';
   readonly stopped: StopReason | null;
   readonly charge: Readonly<Record<ChargeKind, Grams>>;
+  /** The part of the charge that was weighed in by lot; absent where none was. */
+  readonly lots?: readonly ChargedLot[];
   readonly readings: readonly Reading[];
   readonly flaskOut: { readonly at: string; readonly startC: Celsius } | null;
   readonly pour: Pour | null;

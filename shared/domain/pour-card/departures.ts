@@ -6,9 +6,11 @@ import {
   type Celsius,
   type Grams,
 } from '#shared/lib/units.ts';
+import { metalName } from '../metal/metal-name.ts';
 import type { QuenchRule } from '../alloy/quench-rule.ts';
 import type { CardEvent, StopReason } from './card-event.ts';
 import type { CardContext, Departure, Pour } from './card-state.ts';
+import type { MetalVerdict } from './judge-metal.ts';
 
 type Departures = readonly Departure[];
 
@@ -109,6 +111,23 @@ export const ofClosing = (
       : none;
   return [...loss, ...fault];
 };
+
+/** A charge whose parts, by its lots' certificates, are outside what the alloy allows. */
+export const ofComposition = ({ offWt }: MetalVerdict, at: string): Departures =>
+  offWt.length === 0
+    ? none
+    : [
+        {
+          kind: 'composition-off',
+          sentence: `By the lots' certificates the charge holds ${offWt
+            .map(
+              ({ element, wt }) =>
+                `${Math.abs(wt).toFixed(2)} wt% too ${wt > 0 ? 'much' : 'little'} ${metalName(element)}`,
+            )
+            .join(' and ')}.`,
+          at,
+        },
+      ];
 
 const stopWords: Readonly<Record<StopReason, string>> = {
   spill: 'a spill',

@@ -13,6 +13,7 @@ const studio: Studio = {
   idleLockS: 180,
   processTables: defaultProcessTables,
   limits: defaultStudioLimits,
+  marksPlace: 'ISO 9202',
   abilities: { update: true },
 };
 

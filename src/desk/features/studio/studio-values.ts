@@ -39,7 +39,7 @@ const writePart = (part: unknown, key: string): unknown => {
   return part;
 };
 
-const textKeys = ['name', 'temperatureUnit', 'massUnit', 'timeZone'];
+const textKeys = ['name', 'temperatureUnit', 'massUnit', 'timeZone', 'marksPlace'];
 
 const readNumber = (text: string, key: string): number => {
   const parsed = parseDecimal(text);

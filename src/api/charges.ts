@@ -1,0 +1,31 @@
+import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import type {
+  ChargeProposal,
+  PlanChargeRequest,
+  SavedChargePlan,
+  SavePlanRequest,
+} from '#shared/contracts/charge.ts';
+import { http } from '#src/lib/http.ts';
+
+/** The charge plan kept for a casting, null where there is none. */
+export const chargePlanQuery = (castingId: string) =>
+  queryOptions({
+    queryKey: ['charge-plans', castingId],
+    queryFn: () => http.get<SavedChargePlan | null>(`/api/charge-plans?castingId=${castingId}`),
+  });
+
+/** Plans a charge from the lots on hand; nothing is kept. */
+export const useProposeCharge = () =>
+  useMutation({
+    mutationFn: (request: PlanChargeRequest) =>
+      http.post<ChargeProposal[]>('/api/charge-plans/proposals', request),
+  });
+
+/** Keeps a charge plan; the newest counts. */
+export const useSaveChargePlan = () => {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (request: SavePlanRequest) => http.post<SavedChargePlan>('/api/charge-plans', request),
+    onSuccess: () => client.invalidateQueries({ queryKey: ['charge-plans'] }),
+  });
+};
