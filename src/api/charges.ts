@@ -11,7 +11,9 @@ import { http } from '#src/lib/http.ts';
 export const chargePlanQuery = (castingId: string) =>
   queryOptions({
     queryKey: ['charge-plans', castingId],
-    queryFn: () => http.get<SavedChargePlan | null>(`/api/charge-plans?castingId=${castingId}`),
+    // No plan is answered with no content at all.
+    queryFn: async () =>
+      (await http.get<SavedChargePlan | undefined>(`/api/charge-plans?castingId=${castingId}`)) ?? null,
   });
 
 /** Plans a charge from the lots on hand; nothing is kept. */

@@ -27,6 +27,26 @@ const pages: readonly RouteObject[] = [
     lazy: async () => ({ Component: (await import('../features/alloys/alloy-page.tsx')).AlloyPage }),
   },
   {
+    path: 'metal',
+    lazy: async () => ({ Component: (await import('../features/metal/metal-page.tsx')).MetalPage }),
+  },
+  {
+    path: 'metal/receive',
+    lazy: async () => ({ Component: (await import('../features/metal/receive-page.tsx')).ReceivePage }),
+  },
+  {
+    path: 'metal/lots/:lotId',
+    lazy: async () => ({ Component: (await import('../features/metal/lot-page.tsx')).LotPage }),
+  },
+  {
+    path: 'metal/plan',
+    lazy: async () => ({ Component: (await import('../features/metal/plan-page.tsx')).PlanPage }),
+  },
+  {
+    path: 'metal/month',
+    lazy: async () => ({ Component: (await import('../features/metal/month-page.tsx')).MonthPage }),
+  },
+  {
     path: 'flasks',
     lazy: async () => ({ Component: (await import('../features/flasks/flasks-page.tsx')).FlasksPage }),
   },
@@ -67,6 +87,10 @@ const prints: readonly RouteObject[] = [
     lazy: async () => ({
       Component: (await import('../features/print/flask-plate-page.tsx')).FlaskPlatePage,
     }),
+  },
+  {
+    path: 'print/lots/:lotId',
+    lazy: async () => ({ Component: (await import('../features/metal/lot-label-page.tsx')).LotLabelPage }),
   },
   {
     path: 'print/castings/:castingId',

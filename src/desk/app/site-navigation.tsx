@@ -1,4 +1,5 @@
 import { NavLink } from 'react-router-dom';
+import type { Role } from '#shared/domain/people/role.ts';
 import { cx } from '#src/ui/cx.ts';
 import { useDeskSession, type DeskSession } from '../parts/desk-session.ts';
 
@@ -7,26 +8,33 @@ interface Place {
   readonly name: string;
   /** The ability without which the place is not offered. */
   readonly needs?: keyof DeskSession['abilities'];
+  /** The roles to which the place is offered; to all where none is named. */
+  readonly roles?: readonly Role[];
 }
 
 const places: readonly Place[] = [
   { to: '/', name: 'Today' },
   { to: '/melts', name: 'Melt book' },
   { to: '/alloys', name: 'Alloys' },
+  { to: '/metal', name: 'Metal', roles: ['owner', 'caster'] },
   { to: '/flasks', name: 'Flasks' },
   { to: '/people', name: 'People', needs: 'managePeople' },
   { to: '/terminals', name: 'Terminals', needs: 'manageTerminals' },
   { to: '/studio', name: 'Studio', needs: 'editStudio' },
 ];
 
+const isOffered = ({ needs, roles }: Place, { abilities, person }: DeskSession): boolean =>
+  (needs === undefined || abilities[needs]) &&
+  (roles === undefined || roles.some((role) => person.roles.includes(role)));
+
 /** The places of the desk that this person may open. */
 export const SiteNavigation = () => {
-  const { abilities } = useDeskSession();
+  const session = useDeskSession();
   return (
     <nav aria-label="Desk">
       <ul className="flex flex-wrap gap-x-[22px] gap-y-1">
         {places
-          .filter(({ needs }) => needs === undefined || abilities[needs])
+          .filter((place) => isOffered(place, session))
           .map(({ to, name }) => (
             <li key={to}>
               <NavLink

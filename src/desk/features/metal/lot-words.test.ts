@@ -24,7 +24,7 @@ describe('finenessOf', () => {
 
 describe('totalsSentence', () => {
   it('adds up every metal of the lots, whatever alloy it is in', () => {
-    const lots = [
+    const lots: Parameters<typeof totalsSentence>[0] = [
       { contentsMg: { Au: 75_000, Ag: 12_500, Cu: 12_500 }, quarantineReason: null },
       { contentsMg: { Ag: 92_500, Cu: 7_500 }, quarantineReason: 'paper missing' },
     ];
