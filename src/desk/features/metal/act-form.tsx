@@ -4,8 +4,8 @@ import { FormProvider, useForm, type DefaultValues, type FieldValues, type Path 
 import type { z } from 'zod';
 import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
-import { applyProblem } from '../../parts/apply-problem.ts';
-import { FormProblem } from '../../parts/form-problem.tsx';
+import { applyProblem } from '#src/desk/parts/apply-problem.ts';
+import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import { atFormPlaces, formSchema, type FormReading } from './form-schema.ts';
 
 /** Props of {@link ActForm}. */

@@ -1,7 +1,7 @@
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { MassUnit } from '#shared/lib/units.ts';
-import type { PartValues } from '../alloys/alloy-form-values.ts';
-import { formPathOf } from '../alloys/read-alloy-form.ts';
+import type { PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
 import type { FormReading } from './form-schema.ts';
 import { readMass } from './metal-mass.ts';
 import { readParts } from './read-parts.ts';

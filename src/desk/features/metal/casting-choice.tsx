@@ -3,7 +3,7 @@ import { describeCastingState } from '#shared/domain/casting/casting-state.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { CheckField } from '#src/ui/check-field.tsx';
 import { Notice } from '#src/ui/notice.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 
 /** Props of {@link CastingChoice}. */
 export interface CastingChoiceProps {

@@ -5,8 +5,8 @@ import { Crucible } from '#src/ui/crucible.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
 import { FinenessScale } from '#src/ui/fineness-scale.tsx';
 import { Notice } from '#src/ui/notice.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
-import { PlainTable } from '../alloys/plain-table.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 import { gapWords, shareWords, wouldDoSentence } from './charge-words.ts';
 
 type Planned = Extract<ChargeOutcome, { readonly kind: 'planned' }>;

@@ -7,8 +7,8 @@ import {
   type LotDetail,
 } from '#shared/contracts/lot.ts';
 import { useAmendLot, useCountLot, useDispatchLot, useReleaseLot } from '#src/api/lots.ts';
-import { useStudio } from '../../parts/use-studio.ts';
-import { CompositionFields } from '../alloys/composition-fields.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
 import { CountersignFields, MassField, ReasonField, WordsField } from './act-fields.tsx';
 import { ActForm } from './act-form.tsx';
 import {

@@ -5,7 +5,7 @@ import { lotDocumentPath, useAddLotDocument } from '#src/api/lots.ts';
 import { ProblemError, sentenceOf } from '#src/lib/http.ts';
 import { FieldError } from '#src/ui/field.tsx';
 import { Spinner } from '#src/ui/spinner.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
 
 /** The size of a file in words. */
 export const sizeWords = (bytes: number): string =>

@@ -1,7 +1,7 @@
 import { useSearchParams } from 'react-router-dom';
 import { lotKindNames, lotKinds } from '#shared/domain/metal/lot.ts';
 import { SelectField } from '#src/ui/select-field.tsx';
-import { capitalised } from '../alloys/element-names.ts';
+import { capitalised } from '#src/desk/parts/element-names.ts';
 import type { LotFilters } from './lot-filters.ts';
 
 const kinds = lotKinds.map((kind) => ({ value: kind, label: capitalised(lotKindNames[kind]) }));

@@ -1,8 +1,8 @@
 import { Link } from 'react-router-dom';
 import type { LotAmendment, LotDetail } from '#shared/contracts/lot.ts';
 import type { AmendmentKind } from '#shared/domain/metal/lot.ts';
-import { useStudio } from '../../parts/use-studio.ts';
-import { writeComposition } from '../alloys/element-names.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
 
 const kindWords: Readonly<Record<AmendmentKind, string>> = {
   assay: 'New assay',

@@ -4,11 +4,11 @@ import type { LotDetail } from '#shared/contracts/lot.ts';
 import { lotKindNames } from '#shared/domain/metal/lot.ts';
 import { splitCode } from '#shared/lib/codes.ts';
 import { lotQuery } from '#src/api/lots.ts';
-import { FlaskCodePicture } from '../../parts/flask-code-picture.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
-import { writeComposition } from '../alloys/element-names.ts';
-import { PrintFrame } from '../print/print-frame.tsx';
+import { FlaskCodePicture } from '#src/desk/parts/flask-code-picture.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
+import { PrintFrame } from '#src/desk/parts/print-frame.tsx';
 import './lot-label.css';
 
 const advice =

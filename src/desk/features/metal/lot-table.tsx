@@ -5,10 +5,10 @@ import { lotKindNames } from '#shared/domain/metal/lot.ts';
 import { useNow } from '#src/lib/use-now.ts';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { FlaskCodeText } from '../../parts/flask-code-text.tsx';
-import { useSortingInAddress } from '../../parts/use-sorting-in-address.ts';
-import { useStudio, type StudioWriting } from '../../parts/use-studio.ts';
-import { writeComposition } from '../alloys/element-names.ts';
+import { FlaskCodeText } from '#src/desk/parts/flask-code-text.tsx';
+import { useSortingInAddress } from '#src/desk/parts/use-sorting-in-address.ts';
+import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
+import { writeComposition } from '#src/desk/parts/element-names.ts';
 import { ageWords, finenessOf, finenessWords } from './lot-words.ts';
 
 const column = createColumnHelper<Lot>();

@@ -1,7 +1,7 @@
 import type { MonthOfMetal } from '#shared/domain/metal/reconcile.ts';
 import { cx } from '#src/ui/cx.ts';
-import { useStudio } from '../../parts/use-studio.ts';
-import { capitalised, elementName } from '../alloys/element-names.ts';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { capitalised, elementName } from '#src/desk/parts/element-names.ts';
 import { writeExactMass } from './metal-mass.ts';
 import type { MonthLine } from './month-words.ts';
 

@@ -8,10 +8,10 @@ import { Icon } from '#src/ui/icon.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
-import { Loaded } from '../../parts/loaded.tsx';
-import { useStudio } from '../../parts/use-studio.ts';
-import { Panel } from '../alloys/panel.tsx';
-import { PlainTable } from '../alloys/plain-table.tsx';
+import { Loaded } from '#src/desk/parts/loaded.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { Panel } from '#src/desk/parts/panel.tsx';
+import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 import { writeExactMass } from './metal-mass.ts';
 import { MonthAccount } from './month-account.tsx';
 import {

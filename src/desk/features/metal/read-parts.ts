@@ -1,8 +1,8 @@
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { Assay } from '#shared/domain/metal/lot.ts';
 import { parseDecimal } from '#shared/lib/decimal.ts';
-import type { PartValues } from '../alloys/alloy-form-values.ts';
-import { tidySymbol } from '../alloys/read-alloy-form.ts';
+import type { PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import { tidySymbol } from '#src/desk/parts/read-alloy-form.ts';
 
 /** What typed parts say, and what in them cannot be read, at `parts.<row>.<column>`. */
 export interface ReadParts extends Assay {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { receiveLotRequest } from '#shared/contracts/lot.ts';
-import { studioClock } from '../../parts/studio-clock.ts';
+import { studioClock } from '#src/desk/parts/studio-clock.ts';
 import { formSchema } from './form-schema.ts';
 import { emptyReceive, receiveReading } from './receive-values.ts';
 

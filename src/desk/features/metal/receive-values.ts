@@ -1,9 +1,9 @@
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { LotKind } from '#shared/domain/metal/lot.ts';
 import type { MassUnit } from '#shared/lib/units.ts';
-import type { StudioClock } from '../../parts/studio-clock.ts';
-import { emptyPart, type PartValues } from '../alloys/alloy-form-values.ts';
-import { formPathOf } from '../alloys/read-alloy-form.ts';
+import type { StudioClock } from '#src/desk/parts/studio-clock.ts';
+import { emptyPart, type PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
 import type { FormReading } from './form-schema.ts';
 import { readMass } from './metal-mass.ts';
 import { readParts } from './read-parts.ts';
