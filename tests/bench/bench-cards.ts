@@ -49,9 +49,10 @@ export const benchCards = async (): Promise<Record<string, number>> => {
       context: { plannedMetalG: number; figures: { pourC: { target: number } } };
     };
     const opened = await agent.post(`/api/cards/${casting.id}/open`).send(stamp()).expect(200);
+    const { melt } = opened.body as { melt: { id: string } };
     const record = (event: object) =>
       agent
-        .post(`/api/melts/${opened.body.melt.id}/events`)
+        .post(`/api/melts/${melt.id}/events`)
         .send({ ...stamp(), event })
         .expect(201);
     await record(guarded);

@@ -195,7 +195,7 @@ describe('what a terminal refuses', () => {
     await desk.page.getByRole('button', { name: /Unlock the PIN/ }).waitFor({ state: 'detached' });
     await terminal.button('Someone else').click();
     await terminal.signIn('tomas');
-    const session = await (await ask.get('/api/session')).json();
+    const session: unknown = await (await ask.get('/api/session')).json();
     expect(session).toMatchObject({ person: { name } });
   });
 });
