@@ -50,6 +50,8 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/e2e/**/*.test.ts'],
           globalSetup: ['tests/support/postgres-setup.ts', 'tests/support/clients-setup.ts'],
+          // A browser on a busy machine may miss a moment once; what is broken fails twice.
+          retry: 1,
           testTimeout: 180_000,
           hookTimeout: 120_000,
           fileParallelism: false,

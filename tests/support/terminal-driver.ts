@@ -45,6 +45,10 @@ export const driveTerminal = (page: Page, origin: string) => {
 
     /** Types a flask's digits as a scanner does: fast, ending in Enter. */
     scanWithWedge: async (code: string): Promise<void> => {
+      // Standby listens only once it stands; a scanner's keys before that are lost.
+      if (/\/kiosk\/?$/.test(new URL(page.url()).pathname)) {
+        await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
+      }
       await page.keyboard.type(code);
       await page.keyboard.press('Enter');
     },
