@@ -80,8 +80,7 @@ describe('useTheme', () => {
 
 describe('theme-start.js', () => {
   const start = (): void => {
-    // jsdom runs no scripts here, so the file's text is run as a page would run it.
-    // eslint-disable-next-line @typescript-eslint/no-implied-eval, @typescript-eslint/no-unsafe-call
+    // eslint-disable-next-line @typescript-eslint/no-implied-eval, @typescript-eslint/no-unsafe-call -- jsdom runs no scripts here, so the file's text is run as a page would run it.
     new Function(readFileSync('src/public/theme-start.js', 'utf8'))();
   };
 

@@ -34,8 +34,7 @@ export interface DataTableProps<Row> {
 }
 
 declare module '@tanstack/react-table' {
-  // The parameters are the library's own; an augmentation must repeat them.
-  // eslint-disable-next-line @typescript-eslint/no-unused-vars
+  // eslint-disable-next-line @typescript-eslint/no-unused-vars -- the parameters are the library's own; an augmentation must repeat them.
   interface ColumnMeta<TData, TValue> {
     readonly align?: 'left' | 'right';
   }
