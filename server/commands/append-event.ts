@@ -1,7 +1,7 @@
 import { type CreationAttributes, UniqueConstraintError } from 'sequelize';
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import { applyEvent } from '#shared/domain/pour-card/apply-event.ts';
-import { isOver } from '#shared/domain/pour-card/card-state.ts';
+import { isOver, type CardState } from '#shared/domain/pour-card/card-state.ts';
 import type { CastingState } from '#shared/domain/casting/casting-state.ts';
 import { AppError } from '../errors.ts';
 import type { Melt } from '../models/melt.ts';
@@ -26,7 +26,10 @@ export interface ReportedEvent {
 /** Where an event takes the casting, with the reason to be written beside it. */
 const castingStateAfter = (
   event: CardEvent,
+  state: CardState,
 ): { readonly to: CastingState; readonly reason?: string } | null => {
+  const held = state.step === 'done' && state.departures.find(({ explained }) => explained?.hold);
+  if (held) return { to: 'held', reason: held.sentence };
   switch (event.type) {
     case 'poured':
       return { to: 'poured' };
@@ -45,7 +48,7 @@ const moveCastingAlong = async (
   melt: Melt,
   event: CardEvent,
 ): Promise<void> => {
-  const move = castingStateAfter(event);
+  const move = castingStateAfter(event, melt.state);
   if (!move) return;
   const casting = await services.models.Casting.findByPk(melt.castingId, { lock: true });
   if (!casting) throw new Error(`Melt ${melt.code} has lost its casting.`);

@@ -16,6 +16,7 @@ import { loadStudio } from '../queries/load-studio.ts';
 import { refuseUnapprovedAlloy } from '../queries/refuse-unapproved-alloy.ts';
 import type { Services } from '../services/services.ts';
 import { appendEvent } from './append-event.ts';
+import { workerFor } from '../queries/worker-for.ts';
 import { occurredBetween } from './occurred-between.ts';
 
 type OpenCard = z.output<typeof openCardRequest>;
@@ -41,8 +42,9 @@ const carryOn = async (
   const mayTakeAlong = request.carryOn && can(meltPolicy.takeAlong, actor, melt);
   if (!holdsIt && !mayTakeAlong) throw await elsewhere(services, melt);
   if (holdsIt && melt.openedBy === actor.person.id) return melt;
+  const worker = await workerFor(services, actor, melt.alloyRevisionId);
   await melt.update({ terminalId: actor.terminal.id, openedBy: actor.person.id });
-  await appendEvent(services, actor, melt, { ...request, event: { type: 'carried-on' } });
+  await appendEvent(services, actor, melt, { ...request, event: { type: 'carried-on', worker } });
   return melt;
 };
 
@@ -72,6 +74,7 @@ const begin = async (
   request: OpenCard,
 ): Promise<Melt> => {
   refuseUnready(casting);
+  const worker = await workerFor(services, actor, casting.alloyRevisionId);
   const studio = await loadStudio(services);
   const instruction = await loadInstruction(services);
   const number = await nextMeltNumber(services);
@@ -81,14 +84,14 @@ const begin = async (
     castingId: casting.id,
     alloyRevisionId: casting.alloyRevisionId,
     workInstructionRevisionId: instruction.id,
-    context: cardContextOf(casting, studio),
+    context: cardContextOf(casting, studio, instruction),
     state: freshCard,
     openedBy: actor.person.id,
     terminalId: actor.terminal.id,
     openedAt: occurredBetween(request.occurredAt, null, services.now()),
   });
   await casting.update({ meltId: melt.id });
-  await appendEvent(services, actor, melt, { ...request, event: { type: 'card-opened' } });
+  await appendEvent(services, actor, melt, { ...request, event: { type: 'card-opened', worker } });
   return melt;
 };
 

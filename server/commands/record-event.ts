@@ -12,27 +12,19 @@ import { can } from '../policies/policy.ts';
 import type { Services } from '../services/services.ts';
 import { appendEvent, keyUsed } from './append-event.ts';
 import { lockRow } from './lock-row.ts';
+import { refuseUnsigned } from './refuse-unsigned.ts';
 import { withCertificate } from './with-certificate.ts';
 
 type RecordEvent = z.output<typeof recordEventRequest>;
 
 /** Refuses what only a caster or the owner decides: to end a card, or to stand by a doubtful reading. */
 const refuseUndecided = (actor: AtTerminal, melt: Melt, event: CardEvent): void => {
-  const decides = event.type === 'abandoned' || (event.type === 'reading-taken' && event.confirmed);
+  const decides =
+    event.type === 'abandoned' ||
+    (event.type === 'reading-taken' && event.confirmed) ||
+    (event.type === 'charge-closed' && event.offPlan === true);
   if (!decides || can(meltPolicy.decide, actor, melt)) return;
   throw new AppError('not-allowed', 'A caster or the owner has to decide this. Ask one to sign in here.');
-};
-
-/** Refuses a guard that leaves out a caution of the instruction this melt was opened with. */
-const refuseUnguarded = async ({ models }: Services, melt: Melt, event: CardEvent): Promise<void> => {
-  if (event.type !== 'guard-confirmed') return;
-  const { content } = await models.WorkInstructionRevision.findByPk(melt.workInstructionRevisionId, {
-    rejectOnEmpty: true,
-  });
-  const open = content.prompts.filter(({ key }) => !event.prompts.includes(key));
-  if (open.length === 0) return;
-  const sentences = open.map(({ sentence }) => sentence).join(' ');
-  throw new AppError('event-refused', `Every caution has to be confirmed. Still open: ${sentences}`);
 };
 
 /** Judges a reading as the terminal does, whatever the terminal did; returns it with `confirmed` only where it was needed. */
@@ -91,7 +83,7 @@ export const recordEvent = (
       );
     }
     refuseUndecided(actor, melt, reported);
-    await refuseUnguarded(services, melt, reported);
+    await refuseUnsigned(services, melt, reported);
     const event = await withCertificate(services, reported);
     return appendEvent(services, actor, melt, { ...request, event });
   });

@@ -4,6 +4,7 @@ import { AlloyRevision } from './alloy-revision.ts';
 import { Casting } from './casting.ts';
 import { CastingMove } from './casting-move.ts';
 import { ChargePlan } from './charge-plan.ts';
+import { Countersign } from './countersign.ts';
 import { Crucible } from './crucible.ts';
 import { Flask } from './flask.ts';
 import { Lot } from './lot.ts';
@@ -13,6 +14,7 @@ import { MeltAmendment } from './melt-amendment.ts';
 import { MeltEvent } from './melt-event.ts';
 import { Melt } from './melt.ts';
 import { MetalMovement } from './metal-movement.ts';
+import { Photograph } from './photograph.ts';
 import { Reading } from './reading.ts';
 import { StockCount } from './stock-count.ts';
 import { StudioSettings } from './studio-settings.ts';
@@ -71,6 +73,9 @@ const associate = (): void => {
   MeltEvent.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   MeltEvent.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
   MeltAmendment.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  Photograph.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  WorkInstructionRevision.belongsTo(User, { as: 'drafter', foreignKey: 'draftedBy' });
+  WorkInstructionRevision.belongsTo(User, { as: 'approver', foreignKey: 'approvedBy' });
 };
 
 const classes = {
@@ -79,6 +84,7 @@ const classes = {
   Casting,
   CastingMove,
   ChargePlan,
+  Countersign,
   Crucible,
   Flask,
   Lot,
@@ -88,6 +94,7 @@ const classes = {
   MeltAmendment,
   MeltEvent,
   MetalMovement,
+  Photograph,
   Reading,
   StockCount,
   StudioSettings,

@@ -6,6 +6,7 @@ import {
   type InferCreationAttributes,
   type Sequelize,
 } from 'sequelize';
+import type { Apprenticeship } from '#shared/domain/people/apprenticeship.ts';
 import type { Role } from '#shared/domain/people/role.ts';
 
 /** A person of the studio. */
@@ -17,6 +18,8 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
   declare email: CreationOptional<string | null>;
   declare roles: Role[];
   declare active: CreationOptional<boolean>;
+  /** What they may do as an apprentice; null for everything. */
+  declare apprenticeship: CreationOptional<Apprenticeship | null>;
   declare passwordHash: string;
   declare pinHash: string | null;
   /** Wrong PINs in a row. */
@@ -37,6 +40,7 @@ export class User extends Model<InferAttributes<User>, InferCreationAttributes<U
         email: { type: DataTypes.TEXT },
         roles: { type: DataTypes.ARRAY(DataTypes.TEXT), allowNull: false },
         active: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: true },
+        apprenticeship: { type: DataTypes.JSONB },
         passwordHash: { type: DataTypes.TEXT, allowNull: false },
         pinHash: { type: DataTypes.TEXT },
         pinFailures: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },

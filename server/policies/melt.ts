@@ -16,6 +16,16 @@ export const meltPolicy = {
     who: worksAtFurnace,
     when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
   },
+  /** A second person signs at the terminal that holds the card. */
+  countersign: {
+    who: worksAtFurnace,
+    when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
+  },
+  addPhotograph: {
+    who: worksAtFurnace,
+    when: (actor: Actor, melt: Melt) => melt.terminalId === actor.terminal?.id,
+  },
+  readPhotograph: { who: isSignedIn },
   /** Who opened a card takes it to another terminal; the owner too, when that person or that terminal is gone. */
   takeAlong: {
     who: worksAtFurnace,

@@ -1,4 +1,5 @@
 import type { Person, PersonAtTerminal } from '#shared/contracts/person.ts';
+import { unlimited } from '#shared/domain/people/apprenticeship.ts';
 import type { User } from '../models/user.ts';
 import type { Actor } from '../policies/actor.ts';
 import { personPolicy } from '../policies/person.ts';
@@ -14,6 +15,7 @@ export const presentPerson = (user: User, actor: Actor): Person => ({
   active: user.active,
   hasPin: user.pinHash !== null,
   pinLocked: user.pinLockedAt !== null,
+  apprenticeship: user.apprenticeship ?? unlimited,
   abilities: {
     update: can(personPolicy.update, actor, undefined),
     unlock: user.pinLockedAt !== null && can(personPolicy.unlock, actor, undefined),

@@ -1,7 +1,9 @@
 import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
+import { belongsToWork, hazardsOf } from '#shared/domain/instruction/step-applies.ts';
 import { computeCardFigures } from '#shared/domain/pour-card/card-figures.ts';
 import type { CardContext, ChargeAlloy } from '#shared/domain/pour-card/card-state.ts';
 import type { StudioSettings } from '../models/studio-settings.ts';
+import type { WorkInstructionRevision } from '../models/work-instruction-revision.ts';
 import type { LoadedCasting } from './load-casting.ts';
 
 /** What the metal of a charge of this alloy must come to. */
@@ -18,12 +20,18 @@ export const chargeAlloyOf = ({
 });
 
 /** What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables. */
-export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): CardContext => {
+export const cardContextOf = (
+  casting: LoadedCasting,
+  studio: StudioSettings,
+  { content }: WorkInstructionRevision,
+): CardContext => {
   const { alloyRevision, tree, flask, method } = casting;
+  const { family } = alloyRevision.alloy;
+  const work = { method, family, hazards: hazardsOf(alloyRevision.compositionWt) };
   return {
     figures: computeCardFigures({
       alloyName: `${alloyRevision.alloy.name}, revision ${alloyRevision.number}`,
-      family: alloyRevision.alloy.family,
+      family,
       alloy: alloyRevision.figures,
       quench: alloyRevision.quench,
       method,
@@ -35,6 +43,11 @@ export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): C
     limits: studio.limits,
     plannedMetalG: casting.plannedMetalG,
     alloy: chargeAlloyOf(alloyRevision),
+    rules: {
+      steps: content.steps.filter((step) => belongsToWork(step, work)),
+      flaskCode: flask.code,
+      countersignFactor: studio.limits.countersignFactor,
+    },
     units: { temperature: studio.temperatureUnit, mass: studio.massUnit },
   };
 };

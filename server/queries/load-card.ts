@@ -30,7 +30,7 @@ export const loadCard = async (services: Services, casting: LoadedCasting): Prom
   const [studio, instruction] = await Promise.all([loadStudio(services), loadInstruction(services)]);
   return {
     casting,
-    context: cardContextOf(casting, studio),
+    context: cardContextOf(casting, studio, instruction),
     instruction,
     melt: null,
     events: [],

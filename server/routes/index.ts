@@ -11,6 +11,7 @@ import { lotIntakeRoutes } from './lot-intake.ts';
 import { lotRoutes } from './lots.ts';
 import { meltRoutes } from './melts.ts';
 import { peopleRoutes } from './people.ts';
+import { photographRoutes } from './photographs.ts';
 import { reconciliationRoutes } from './reconciliation.ts';
 import { sessionRoutes } from './sessions.ts';
 import { studioRoutes } from './studio.ts';
@@ -28,6 +29,7 @@ export const routes: readonly Route[] = [
   ...castingRoutes,
   ...cardRoutes,
   ...meltRoutes,
+  ...photographRoutes,
   ...lotRoutes,
   ...lotDocumentRoutes,
   ...lotIntakeRoutes,

@@ -1,7 +1,8 @@
-import { recordEventRequest } from '#shared/contracts/card.ts';
+import { countersignMeltRequest, recordEventRequest } from '#shared/contracts/card.ts';
 import { idParams } from '#shared/contracts/common.ts';
 import { amendMeltRequest, listMeltsQuery } from '#shared/contracts/melt.ts';
 import { amendMelt } from '../commands/amend-melt.ts';
+import { countersignMelt } from '../commands/countersign-melt.ts';
 import { recordEvent } from '../commands/record-event.ts';
 import { meltPolicy } from '../policies/melt.ts';
 import { presentMeltEvent } from '../presenters/card.ts';
@@ -43,6 +44,18 @@ const record = defineRoute({
   },
 });
 
+const countersign = defineRoute({
+  method: 'post',
+  path: '/api/melts/:id/countersigns',
+  policy: meltPolicy.countersign,
+  params: idParams,
+  body: countersignMeltRequest,
+  load: (services, params) => loadMelt(services, params.id),
+  status: 201,
+  act: ({ actor, services, subject, body }) =>
+    countersignMelt(services, requireAtTerminal(actor), subject, body),
+});
+
 const amend = defineRoute({
   method: 'post',
   path: '/api/melts/:id/amendments',
@@ -57,4 +70,4 @@ const amend = defineRoute({
   },
 });
 
-export const meltRoutes = [list, read, record, amend];
+export const meltRoutes = [list, read, record, countersign, amend];

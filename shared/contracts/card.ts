@@ -1,12 +1,21 @@
 import { z } from 'zod';
-import { castLooks, chargeKinds, stopReasons, type CardEvent } from '#shared/domain/pour-card/card-event.ts';
+import type { StepAnswer } from '#shared/domain/instruction/instruction-step.ts';
+import type { WorkInstruction } from '#shared/domain/instruction/work-instruction.ts';
+import {
+  castLooks,
+  chargeKinds,
+  photographSubjects,
+  stopReasons,
+  type CardEvent,
+} from '#shared/domain/pour-card/card-event.ts';
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
-import type { WorkInstruction } from '#shared/domain/pour-card/work-instruction.ts';
+import { varianceReasons } from '#shared/domain/pour-card/variance.ts';
 import type { Casting } from './casting.ts';
 import { lotKinds } from '#shared/domain/metal/lot.ts';
 import type { SavedChargePlan } from './charge.ts';
 import { instant, massG, massOrNoneG, optionalWords, temperatureC, words, type Abilities } from './common.ts';
 import { lotCompositionWt, lotToleranceWt } from './lot.ts';
+import { pin } from './session.ts';
 
 /** The lot metal is taken from, as the terminal knows it; the server writes down what its own records say. */
 const chargeLot = z.object({
@@ -17,9 +26,41 @@ const chargeLot = z.object({
   toleranceWt: lotToleranceWt,
 });
 
+const stepKey = z.string().min(1).max(60);
+
+/** A second person's sign as the terminal has it; the server looks it up in its own records. */
+const countersigned = z.object({
+  id: z.uuid(),
+  personId: z.uuid(),
+  name: z.string().min(1).max(80),
+  onDevice: z.boolean(),
+});
+
+const stepAnswer = z.discriminatedUnion('kind', [
+  z.object({ kind: z.enum(['say', 'check', 'wait', 'hold-to-act']) }),
+  z.object({ kind: z.literal('weigh'), massG: massOrNoneG }),
+  z.object({ kind: z.literal('read'), temperatureC }),
+  z.object({ kind: z.literal('photograph'), photographId: z.uuid() }),
+  z.object({ kind: z.literal('scan'), code: z.string().min(1).max(60) }),
+  z.object({ kind: z.literal('choose'), option: z.string().min(1).max(120) }),
+  z.object({ kind: z.literal('countersign'), by: countersigned }),
+]) satisfies z.ZodType<StepAnswer>;
+
 /** What may be sent from a terminal to the melt book. */
 export const cardEvent = z.discriminatedUnion('type', [
-  z.object({ type: z.literal('guard-confirmed'), prompts: z.array(z.string().max(60)).max(30) }),
+  z.object({ type: z.literal('guard-confirmed'), prompts: z.array(stepKey).max(40) }),
+  z.object({ type: z.literal('checked'), keys: z.array(stepKey).min(1).max(40) }),
+  z.object({ type: z.literal('step-done'), key: stepKey, answer: stepAnswer }),
+  z.object({ type: z.literal('step-skipped'), key: stepKey }),
+  z.object({
+    type: z.literal('variance-explained'),
+    index: z.int().min(0).max(10_000),
+    reason: z.enum(varianceReasons, { error: 'Choose the reason.' }),
+    words: optionalWords(1000),
+    hold: z.boolean(),
+    by: countersigned.nullable(),
+  }),
+  z.object({ type: z.literal('photographed'), photographId: z.uuid(), of: z.enum(photographSubjects) }),
   z.object({
     type: z.literal('charge-weighed'),
     kind: z.enum(chargeKinds),
@@ -32,7 +73,7 @@ export const cardEvent = z.discriminatedUnion('type', [
     massG,
     lot: chargeLot.optional(),
   }),
-  z.object({ type: z.literal('charge-closed') }),
+  z.object({ type: z.literal('charge-closed'), offPlan: z.boolean().optional() }),
   z.object({ type: z.literal('reading-taken'), temperatureC, confirmed: z.boolean().default(false) }),
   z.object({ type: z.literal('melt-ready') }),
   z.object({ type: z.literal('flask-out'), furnaceC: temperatureC.nullable() }),
@@ -66,6 +107,23 @@ export const openCardRequest = z.object({
 });
 /** Opens a casting's card. */
 export type OpenCardRequest = z.input<typeof openCardRequest>;
+
+/** Asks another person to sign at the terminal for something on a melt. */
+export const countersignMeltRequest = z.object({ personId: z.uuid('Choose who signs.'), pin });
+/** Asks another person to sign. */
+export type CountersignMeltRequest = z.input<typeof countersignMeltRequest>;
+
+/** A photograph is sent as the body; `id` is made once, so that sending it again keeps it once. */
+export const addPhotographQuery = z.object({ id: z.uuid() });
+
+/** A photograph of a melt. */
+export interface Photograph {
+  readonly id: string;
+  readonly mediaType: string;
+  readonly bytes: number;
+  readonly person: string;
+  readonly at: string;
+}
 
 /** One event of the melt book. */
 export interface MeltEvent {

@@ -1,5 +1,7 @@
 import { z } from 'zod';
+import type { Apprenticeship } from '#shared/domain/people/apprenticeship.ts';
 import { roles, type Role } from '#shared/domain/people/role.ts';
+import { cardSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 import { words, type Abilities } from './common.ts';
 import { pin } from './session.ts';
 
@@ -25,6 +27,22 @@ const roleList = z
   .max(roles.length)
   .refine((list) => new Set(list).size === list.length, 'Each role counts once.');
 
+const pourParts: readonly CardStep[] = ['flask-out', 'pour', 'quench'];
+
+/** What an apprentice may do: which alloys, which parts of a card; null for all of them. */
+export const apprenticeship = z
+  .object({
+    alloyIds: z.array(z.uuid()).max(200).nullable(),
+    parts: z.array(z.enum(cardSteps)).max(cardSteps.length).nullable(),
+  })
+  .refine(
+    ({ parts }) =>
+      parts === null ||
+      pourParts.every((part) => parts.includes(part)) ||
+      !pourParts.some((part) => parts.includes(part)),
+    { error: 'Flask out, pour and quench follow one another too fast to be parted.', path: ['parts'] },
+  ) satisfies z.ZodType<Apprenticeship>;
+
 /** Adds a person. */
 export const createPersonRequest = z.object({
   name,
@@ -47,6 +65,7 @@ export const updatePersonRequest = z
     active: z.boolean(),
     password,
     pin: pin.nullable(),
+    apprenticeship,
   })
   .partial()
   .refine((change) => Object.keys(change).length > 0, 'Nothing was changed.');
@@ -65,6 +84,7 @@ export interface Person {
   readonly hasPin: boolean;
   /** Whether wrong PINs have locked the terminal sign-in until the owner opens it again. */
   readonly pinLocked: boolean;
+  readonly apprenticeship: Apprenticeship;
   readonly abilities: Abilities<'update' | 'unlock'>;
 }
 

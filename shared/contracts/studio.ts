@@ -61,6 +61,7 @@ export const studioLimits = z.object({
   lossShare: z.number().min(0, 'Not below 0.').max(0.2, 'At most 20 %.'),
   furnaceMaxC: z.number().min(900, 'At least 900.').max(2000, 'At most 2000.'),
   questionAboveC: z.number().min(20, 'At least 20.').max(500, 'At most 500.'),
+  countersignFactor: z.number().min(1, 'At least 1.').max(10, 'At most 10.'),
 }) satisfies z.ZodType<StudioLimits>;
 
 /** Changes the studio's settings; `version` is the one that was edited. */

@@ -1,5 +1,5 @@
 import type { CreationAttributes } from 'sequelize';
-import { defaultInstruction } from '#shared/domain/pour-card/work-instruction.ts';
+import { defaultInstruction } from '#shared/domain/instruction/default-instruction.ts';
 import { defaultProcessTables } from '#shared/domain/studio/process-tables.ts';
 import { defaultStudioLimits } from '#shared/domain/studio/studio-limits.ts';
 import type { StudioSettings } from '#server/models/studio-settings.ts';

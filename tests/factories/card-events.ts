@@ -1,24 +1,33 @@
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
-import { defaultInstruction } from '#shared/domain/pour-card/work-instruction.ts';
+import { defaultSteps } from '#shared/domain/instruction/default-steps.ts';
+import { stepsBefore } from '#shared/domain/instruction/step-applies.ts';
 import { cardSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 
 /** A step a built card can be led to. */
 export type ReachableStep = CardStep | 'done';
 
-/** The guard with every caution of the default instruction confirmed. */
+type Planned = Pick<CardContext, 'figures' | 'plannedMetalG' | 'rules'>;
+
+/** The guard with every caution of the default instruction confirmed that every card has. */
 export const guarded = {
   type: 'guard-confirmed',
-  prompts: defaultInstruction.prompts.map(({ key }) => key),
+  prompts: stepsBefore(defaultSteps, 'guard', 'caster')
+    .filter(({ when }) => when.hazards.length === 0)
+    .map(({ key }) => key),
 } as const satisfies CardEvent;
 
-const eventsOf = (
-  step: CardStep,
-  { figures, plannedMetalG }: Pick<CardContext, 'figures' | 'plannedMetalG'>,
-): readonly CardEvent[] => {
+/** What is read and touched before a part of the card, as the card itself has it. */
+export const checksBefore = (part: CardStep, { rules }: Pick<CardContext, 'rules'>): readonly CardEvent[] => {
+  const keys = stepsBefore(rules?.steps ?? [], part, 'caster').map(({ key }) => key);
+  if (part === 'guard') return [{ type: 'guard-confirmed', prompts: keys }];
+  return keys.length > 0 ? [{ type: 'checked', keys }] : [];
+};
+
+const eventsOf = (step: CardStep, { figures, plannedMetalG }: Planned): readonly CardEvent[] => {
   switch (step) {
     case 'guard':
-      return [guarded];
+      return [];
     case 'charge':
       return [{ type: 'charge-weighed', kind: 'grain', massG: plannedMetalG }, { type: 'charge-closed' }];
     case 'melt':
@@ -38,10 +47,7 @@ const eventsOf = (
 };
 
 /** The events that lead a freshly opened card to a step, all as the card plans them. */
-export const eventsTo = (
-  step: ReachableStep,
-  context: Pick<CardContext, 'figures' | 'plannedMetalG'>,
-): readonly CardEvent[] => {
+export const eventsTo = (step: ReachableStep, context: Planned): readonly CardEvent[] => {
   const passed = step === 'done' ? cardSteps : cardSteps.slice(0, cardSteps.indexOf(step));
-  return passed.flatMap((each) => eventsOf(each, context));
+  return passed.flatMap((each) => [...checksBefore(each, context), ...eventsOf(each, context)]);
 };

@@ -4,11 +4,12 @@ import { MessageScreen } from '#kiosk/lib/message-screen.tsx';
 import { firstName } from '#kiosk/lib/presence.ts';
 import { rememberClock } from '#kiosk/lib/remembered-clocks.ts';
 import { runningClockOf } from '#kiosk/lib/running-clock.ts';
+import { openSteps } from '#shared/domain/pour-card/apply-steps.ts';
 import { ChargeStep } from './charge-step.tsx';
+import { CheckRun } from './check-run.tsx';
 import { CloseStep } from './close-step.tsx';
 import { DoneStep } from './done-step.tsx';
 import { FlaskOutStep } from './flask-out-step.tsx';
-import { GuardStep } from './guard-step.tsx';
 import { MeltStep } from './melt-step.tsx';
 import { PourStep } from './pour-step.tsx';
 import { QuenchStep } from './quench-step.tsx';
@@ -18,7 +19,7 @@ import { useCarryOn } from './use-carry-on.ts';
 import { useRunningCard, type RunningCard } from './use-running-card.ts';
 
 const steps: Readonly<Record<CardStep | 'done' | 'abandoned', ComponentType<{ running: RunningCard }>>> = {
-  guard: GuardStep,
+  guard: CheckRun,
   charge: ChargeStep,
   melt: MeltStep,
   'flask-out': FlaskOutStep,
@@ -54,6 +55,7 @@ export const CardSteps = ({ card }: Pick<RunningCard, 'card'>) => {
       />
     );
   }
-  const Step = running.state.stopped ? StoppedStep : steps[running.state.step];
-  return <Step key={running.state.step} running={running} />;
+  const open = openSteps(running.state, card.context).length;
+  const Step = running.state.stopped ? StoppedStep : open > 0 ? CheckRun : steps[running.state.step];
+  return <Step key={`${running.state.step} ${open}`} running={running} />;
 };

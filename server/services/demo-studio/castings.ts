@@ -113,7 +113,6 @@ export const demoCastings: readonly DemoCasting[] = [
     past: {
       by: 'tomas',
       secondsToPour: 92,
-
       look: 'misrun',
       note: 'Tongs slipped at the furnace door; two teeth short.',
     },

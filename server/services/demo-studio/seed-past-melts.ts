@@ -1,10 +1,14 @@
 import { randomBytes, randomUUID } from 'node:crypto';
 import type { CardEvent, ChargeKind, ChargeLot } from '#shared/domain/pour-card/card-event.ts';
-import type { CardFigures } from '#shared/domain/pour-card/card-figures.ts';
+import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
+import type { CardStep } from '#shared/domain/pour-card/card-step.ts';
+import { openVariances, wantsCountersign } from '#shared/domain/pour-card/apply-variance.ts';
+import { stepsBefore } from '#shared/domain/instruction/step-applies.ts';
 import { moveCasting } from '../../commands/move-casting.ts';
 import { openCard } from '../../commands/open-card.ts';
 import { recordEvent } from '../../commands/record-event.ts';
 import type { Casting } from '../../models/casting.ts';
+import type { User } from '../../models/user.ts';
 import type { Terminal } from '../../models/terminal.ts';
 import type { AtTerminal } from '../../policies/actor.ts';
 import { hashToken } from '../hashing.ts';
@@ -19,10 +23,16 @@ type Past = NonNullable<DemoCasting['past']>;
 const eventsOf = (
   past: Past,
   casting: Casting,
-  { liquidusC, pourC, quench }: CardFigures,
+  { figures: { liquidusC, pourC, quench }, rules }: CardContext,
   lotOf: (kind: ChargeKind) => ChargeLot,
 ): readonly (readonly [number, CardEvent])[] => {
   const { plannedMetalG } = casting;
+  const keysBefore = (part: CardStep): readonly string[] =>
+    stepsBefore(rules?.steps ?? [], part, 'caster').map(({ key }) => key);
+  const checks = (seconds: number, part: CardStep): readonly (readonly [number, CardEvent])[] => {
+    const keys = keysBefore(part);
+    return keys.length > 0 ? [[seconds, { type: 'checked', keys }]] : [];
+  };
   const returns = Math.round(plannedMetalG * 0.35 * 100) / 100;
   const button = Math.round(plannedMetalG * 0.11 * 100) / 100;
   const loss = Math.round(plannedMetalG * 0.002 * 1000) / 1000;
@@ -30,7 +40,8 @@ const eventsOf = (
   const poured = flaskOut + past.secondsToPour;
   const quenched = poured + quench.earliestS + 25;
   return [
-    [20, { type: 'guard-confirmed', prompts: ['face', 'hands', 'eyes', 'dry', 'air', 'hot'] }],
+    [20, { type: 'guard-confirmed', prompts: keysBefore('guard') }],
+    ...checks(40, 'charge'),
     [75, { type: 'charge-weighed', kind: 'returns', massG: returns, lot: lotOf('returns') }],
     [
       130,
@@ -46,6 +57,7 @@ const eventsOf = (
     [450, { type: 'reading-taken', temperatureC: Math.round(liquidusC + 30), confirmed: false }],
     [590, { type: 'reading-taken', temperatureC: pourC.target, confirmed: false }],
     [600, { type: 'melt-ready' }],
+    ...checks(610, 'flask-out'),
     [flaskOut, { type: 'flask-out', furnaceC: null }],
     [poured, { type: 'poured' }],
     [quenched, { type: 'quenched' }],
@@ -65,6 +77,9 @@ const lotsOf =
     return { id, code, kind: lot.kind, compositionWt, toleranceWt };
   };
 
+/** When all is over, long after any quench. */
+const afterPourS = 3600;
+
 const runCard = async (
   services: Services,
   actor: AtTerminal,
@@ -72,7 +87,13 @@ const runCard = async (
     demo,
     casting,
     lots,
-  }: { readonly demo: DemoCasting; readonly casting: Casting; readonly lots: SeededLots },
+    signer,
+  }: {
+    readonly demo: DemoCasting;
+    readonly casting: Casting;
+    readonly lots: SeededLots;
+    readonly signer: User;
+  },
 ): Promise<void> => {
   if (!demo.past) return;
   const openedMs = casting.plannedPourAt.getTime() - 640_000;
@@ -83,9 +104,41 @@ const runCard = async (
   });
   const melt = await openCard(at(0), actor, casting.id, { ...stamp(0), carryOn: false });
   const lotOf = lotsOf(lots, demo.alloy);
-  for (const [seconds, event] of eventsOf(demo.past, casting, melt.context.figures, lotOf)) {
+  for (const [seconds, event] of eventsOf(demo.past, casting, melt.context, lotOf)) {
     // The contract's arrays are mutable where the domain's are not.
     await recordEvent(at(seconds), actor, melt.id, { ...stamp(seconds), event: event as never });
+  }
+  await explainDepartures(at(afterPourS), actor, melt.id, signer);
+};
+
+/** Gives each departure of a melt its reason, with a second person's sign where the card wants one. */
+const explainDepartures = async (
+  services: Services,
+  actor: AtTerminal,
+  meltId: string,
+  signer: User,
+): Promise<void> => {
+  const melt = await services.models.Melt.findByPk(meltId, { rejectOnEmpty: true });
+  for (const { index, departure } of openVariances(melt.state, melt.context)) {
+    const sign = { id: randomUUID(), personId: signer.id, name: signer.name, onDevice: false };
+    const by = wantsCountersign(departure, melt.state) ? sign : null;
+    const occurredAt = services.now();
+    if (by) {
+      await services.models.Countersign.create({
+        ...by,
+        meltId,
+        askedBy: actor.person.id,
+        terminalId: actor.terminal.id,
+        signedAt: occurredAt,
+      });
+    }
+    const words = 'Talked over after the pour.';
+    const event = { type: 'variance-explained', index, reason: 'time', words, hold: false, by } as const;
+    await recordEvent(services, actor, meltId, {
+      key: randomUUID(),
+      occurredAt: occurredAt.toISOString(),
+      event,
+    });
   }
 };
 
@@ -104,7 +157,9 @@ export const seedPastMelts = async (
     const user = demo.past && people.get(demo.past.by);
     if (!user) continue;
     const actor: AtTerminal = { person: user, terminal, via: 'terminal' };
-    await runCard(services, actor, { demo, casting, lots });
+    const signer = people.get(demo.past?.by === 'maren' ? 'ines' : 'maren');
+    if (!signer) throw new Error('The demo studio has nobody to sign.');
+    await runCard(services, actor, { demo, casting, lots, signer });
     if (demo.inMinutes > -1000) continue;
     for (const to of ['broken-out', 'cut', 'released'] as const) {
       await moveCasting(services, actor, casting, { to, reason: '' });

@@ -1,7 +1,7 @@
 import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
 import { figuresOfComposition } from '#shared/domain/alloy/figures-of-composition.ts';
 import { metalForWax } from '#shared/domain/pour-card/card-figures.ts';
-import { defaultInstruction } from '#shared/domain/pour-card/work-instruction.ts';
+import { defaultInstruction } from '#shared/domain/instruction/default-instruction.ts';
 import { defaultProcessTables } from '#shared/domain/studio/process-tables.ts';
 import { defaultStudioLimits } from '#shared/domain/studio/studio-limits.ts';
 import { buildCode, buildFlaskCode } from '#shared/lib/codes.ts';

@@ -1,29 +1,23 @@
-import { ok, refuse, type Result } from '#shared/lib/result.ts';
+import { ok, refuse } from '#shared/lib/result.ts';
 import { formatMass, formatTemperature } from '#shared/lib/units.ts';
+import { check, confirmGuard, doStep, openSteps, skipStep } from './apply-steps.ts';
+import { doneWhenExplained, explain } from './apply-variance.ts';
 import type { CardEvent, CardEventType, ChargeWeighing, TimedCardEvent } from './card-event.ts';
+import { secondsBetween, type Applied, type Handler } from './card-handler.ts';
 import { chargedG, freshCard, isOver, lastReading, type CardContext, type CardState } from './card-state.ts';
-import { cardStepNames, type CardStep } from './card-step.ts';
+import { cardStepNames, cardSteps, type CardStep } from './card-step.ts';
 import { changeLots } from './change-lots.ts';
 import * as departures from './departures.ts';
 import { flaskTemperatureAt } from './flask-cooling.ts';
 import { judgeCharge } from './judge-charge.ts';
 import { judgeMetal, sentenceOfMetal } from './judge-metal.ts';
 
-type Applied = Result<CardState>;
-type Handler<Type extends CardEventType> = (
-  state: CardState,
-  event: Extract<CardEvent, { type: Type }>,
-  context: CardContext,
-  at: string,
-) => Applied;
-
-/** Seconds from one instant to another, never negative. */
-export const secondsBetween = (from: string, to: string): number =>
-  Math.max(0, (Date.parse(to) - Date.parse(from)) / 1000);
-
 /** The steps on which each event may happen; events that are not listed may happen on any step. */
 const allowedOn: Readonly<Partial<Record<CardEventType, readonly CardStep[]>>> = {
   'guard-confirmed': ['guard'],
+  checked: cardSteps,
+  'step-done': cardSteps,
+  'step-skipped': cardSteps,
   'charge-weighed': ['charge'],
   'charge-taken-out': ['charge'],
   'charge-closed': ['charge'],
@@ -34,6 +28,16 @@ const allowedOn: Readonly<Partial<Record<CardEventType, readonly CardStep[]>>> =
   quenched: ['quench'],
   closed: ['close'],
 };
+
+/** What has to wait until the instruction's steps before the part are behind. */
+const afterSteps: readonly CardEventType[] = [
+  'charge-weighed',
+  'charge-closed',
+  'melt-ready',
+  'flask-out',
+  'quenched',
+  'closed',
+];
 
 const roundMass = (grams: number): number => Math.round(grams * 1000) / 1000;
 
@@ -55,22 +59,21 @@ const changeCharge = (
   return lots.ok ? ok({ ...charged, lots: lots.value }) : lots;
 };
 
-const closeCharge: Handler<'charge-closed'> = (state, _event, context, at) => {
+const closeCharge: Handler<'charge-closed'> = (state, { offPlan = false }, context, at) => {
   const verdict = judgeCharge(state, context);
   const mass = (grams: number): string => formatMass(grams, context.units.mass);
   const wanted = `The charge is ${mass(verdict.totalG)}. The card wants between ${mass(verdict.lowG)} and ${mass(verdict.highG)}`;
-  switch (verdict.kind) {
-    case 'short':
-      return refuse(`${wanted}: weigh more in.`);
-    case 'over':
-      return refuse(`${wanted}: take some out.`);
-    case 'too-many-returns':
-      return refuse(
-        `${Math.round(verdict.returnsShare * 100)} % of the charge is returns; the studio allows ${Math.round(context.limits.returnsShare * 100)} %. Take returns out and add grain.`,
-      );
-    case 'good':
-      return closeMetal(state, context, at);
+  if (verdict.kind === 'too-many-returns') {
+    return refuse(
+      `${Math.round(verdict.returnsShare * 100)} % of the charge is returns; the studio allows ${Math.round(context.limits.returnsShare * 100)} %. Take returns out and add grain.`,
+    );
   }
+  if (verdict.kind === 'good') return closeMetal(state, context, at);
+  const isTaken = offPlan && context.rules !== undefined && verdict.totalG > 0;
+  if (!isTaken) return refuse(`${wanted}: ${verdict.kind === 'short' ? 'weigh more in' : 'take some out'}.`);
+  if (state.worker?.role === 'apprentice') return refuse(`${wanted}: a caster has to decide this.`);
+  const off = departures.ofCharge(verdict, context, at);
+  return closeMetal({ ...state, departures: [...state.departures, ...off] }, context, at);
 };
 
 /** A charge by lots is closed only when its fineness holds at the certificates' lower bounds. */
@@ -134,14 +137,14 @@ const pour: Handler<'poured'> = (state, _event, context, at) => {
   });
 };
 
-const quench: Handler<'quenched'> = (state, _event, { figures }, at) => {
+const quench: Handler<'quenched'> = (state, _event, context, at) => {
   if (!state.pour) return refuse('Nothing has been poured yet.');
   const waitedS = secondsBetween(state.pour.at, at);
   return ok({
     ...state,
     step: 'close',
     quenchedAt: at,
-    departures: [...state.departures, ...departures.ofQuench(waitedS, figures.quench, at)],
+    departures: [...state.departures, ...departures.ofQuench(waitedS, context, at)],
   });
 };
 
@@ -155,22 +158,26 @@ const close: Handler<'closed'> = (state, event, context, at) => {
     );
   }
   const { buttonMassG, lossMassG, look, note } = event;
-  const found = departures.ofClosing(event, metalIn, context, at);
-  if (state.lots && note === '' && found.some(({ kind }) => kind === 'loss-over-limit')) {
-    return refuse('More is lost than the studio allows. Weigh again, or say in the note where it went.');
-  }
-  return ok({
+  const closed = {
     ...state,
-    step: 'done',
     closing: { at, buttonMassG, lossMassG, castMassG, look, note },
-    departures: [...state.departures, ...found],
-  });
+    departures: [...state.departures, ...departures.ofClosing(event, metalIn, context, at)],
+  };
+  return ok(context.rules ? doneWhenExplained(closed, context) : { ...closed, step: 'done' });
 };
 
 const handlers: { readonly [Type in CardEventType]: Handler<Type> } = {
-  'card-opened': (state) => (state.lastEvent === null ? ok(state) : refuse('This card is already open.')),
-  'carried-on': (state) => ok(state),
-  'guard-confirmed': (state) => ok({ ...state, step: 'charge' }),
+  'card-opened': (state, { worker }) =>
+    state.lastEvent === null
+      ? ok(worker ? { ...state, worker } : state)
+      : refuse('This card is already open.'),
+  'carried-on': (state, { worker }) => ok(worker ? { ...state, worker } : state),
+  'guard-confirmed': confirmGuard,
+  checked: check,
+  'step-done': doStep,
+  'step-skipped': skipStep,
+  'variance-explained': explain,
+  photographed: (state) => ok(state),
   'charge-weighed': (state, event, context) => changeCharge(state, event, 1, context),
   'charge-taken-out': (state, event, context) => changeCharge(state, event, -1, context),
   'charge-closed': closeCharge,
@@ -192,9 +199,18 @@ const handlers: { readonly [Type in CardEventType]: Handler<Type> } = {
   abandoned: (state) => ok({ ...state, step: 'abandoned', stopped: null }),
 };
 
-const whileStopped: readonly CardEventType[] = ['resumed', 'abandoned', 'carried-on'];
+const whileStopped: readonly CardEventType[] = ['resumed', 'abandoned', 'carried-on', 'photographed'];
 
-const refusalFor = (state: CardState, { type }: CardEvent): string | null => {
+const refusalOnPart = (state: CardState, type: CardEventType, context: CardContext): string | null => {
+  const parts = state.worker?.parts ?? null;
+  if (parts && !parts.includes(state.step as CardStep)) {
+    return `“${cardStepNames[state.step as CardStep]}” is not for whoever does this card now. A caster has to take it over.`;
+  }
+  const [open] = openSteps(state, context);
+  return open && afterSteps.includes(type) ? `First: ${open.sentence}` : null;
+};
+
+const refusalFor = (state: CardState, { type }: CardEvent, context: CardContext): string | null => {
   if (isOver(state)) return 'This card is closed. Amend the melt at the desk instead.';
   if (state.lastEvent === null && type !== 'card-opened') return 'This card has not been opened.';
   if (state.stopped && !whileStopped.includes(type)) return 'Work is stopped. Resume it first.';
@@ -202,7 +218,8 @@ const refusalFor = (state: CardState, { type }: CardEvent): string | null => {
   if (steps && !steps.includes(state.step as CardStep)) {
     return `That belongs to another step: the card stands at “${cardStepNames[state.step as CardStep]}”.`;
   }
-  return null;
+  if (type === 'closed' && state.closing) return 'The masses are written down. What is left is the reasons.';
+  return steps ? refusalOnPart(state, type, context) : null;
 };
 
 /** Applies one event to a card; a refusal is one sentence, and leaves the card as it was. */
@@ -211,12 +228,14 @@ export const applyEvent = (
   { event, occurredAt }: TimedCardEvent,
   context: CardContext,
 ): Applied => {
-  const refusal = refusalFor(state, event);
+  const refusal = refusalFor(state, event, context);
   if (refusal !== null) return refuse(refusal);
   // The table pairs each type with its own handler, which TypeScript cannot follow through an index.
   const handler = handlers[event.type] as Handler<CardEventType>;
   const applied = handler(state, event, context, occurredAt);
-  return applied.ok ? ok({ ...applied.value, lastEvent: event.type }) : applied;
+  if (!applied.ok) return applied;
+  const moved = applied.value.step !== state.step || state.lastEvent === null;
+  return ok({ ...applied.value, lastEvent: event.type, ...(moved ? { since: occurredAt } : {}) });
 };
 
 /** Folds a card's events, oldest first, into its state; throws when the record itself is not a possible card. */

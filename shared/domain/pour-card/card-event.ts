@@ -1,5 +1,8 @@
 import type { Celsius, Grams } from '#shared/lib/units.ts';
+import type { Countersigned, StepAnswer, WorkerRole } from '../instruction/instruction-step.ts';
 import type { Assay, LotKind } from '../metal/lot.ts';
+import type { CardStep } from './card-step.ts';
+import type { VarianceReason } from './variance.ts';
 
 /** What is put into the crucible: casting grain of the alloy, or returns of it. */
 export const chargeKinds = ['grain', 'returns'] as const;
@@ -33,15 +36,44 @@ export const castLooks = ['full', 'misrun', 'porous', 'cracked', 'not-seen'] as 
 /** One look of a casting. */
 export type CastLook = (typeof castLooks)[number];
 
+/** Who does a card, and as what, from the moment they opened it or took it over. */
+export interface Worker {
+  readonly personId: string;
+  readonly role: WorkerRole;
+  /** The parts of a card this person may do; null for all. */
+  readonly parts: readonly CardStep[] | null;
+}
+
+/** What a photograph shows. */
+export const photographSubjects = ['tree', 'defect', 'other'] as const;
+/** One subject of a photograph. */
+export type PhotographSubject = (typeof photographSubjects)[number];
+
 /** What may happen on a pour card; each is written to the melt book as it happens. */
 export type CardEvent =
-  | { readonly type: 'card-opened' }
+  | { readonly type: 'card-opened'; readonly worker?: Worker | undefined }
   /** The same card goes on with another person or at another terminal. */
-  | { readonly type: 'carried-on' }
+  | { readonly type: 'carried-on'; readonly worker?: Worker | undefined }
   | { readonly type: 'guard-confirmed'; readonly prompts: readonly string[] }
+  /** Words that were read and checks that were touched, by their keys. */
+  | { readonly type: 'checked'; readonly keys: readonly string[] }
+  | { readonly type: 'step-done'; readonly key: string; readonly answer: StepAnswer }
+  | { readonly type: 'step-skipped'; readonly key: string }
+  /** Why a departure came about; `index` counts the card's departures from 0. */
+  | {
+      readonly type: 'variance-explained';
+      readonly index: number;
+      readonly reason: VarianceReason;
+      readonly words: string;
+      /** Whether the pieces are held until the owner has looked. */
+      readonly hold: boolean;
+      readonly by: Countersigned | null;
+    }
+  | { readonly type: 'photographed'; readonly photographId: string; readonly of: PhotographSubject }
   | ({ readonly type: 'charge-weighed' } & ChargeWeighing)
   | ({ readonly type: 'charge-taken-out' } & ChargeWeighing)
-  | { readonly type: 'charge-closed' }
+  /** `offPlan` when a caster goes on with more or less metal than the card plans. */
+  | { readonly type: 'charge-closed'; readonly offPlan?: boolean | undefined }
   /** `confirmed` says that a person stood by a doubtful reading. */
   | { readonly type: 'reading-taken'; readonly temperatureC: Celsius; readonly confirmed: boolean }
   | { readonly type: 'melt-ready' }

@@ -1,14 +1,25 @@
 import type { Celsius, Grams, Units } from '#shared/lib/units.ts';
+import type { InstructionStep } from '../instruction/instruction-step.ts';
 import type { StudioLimits } from '../studio/studio-limits.ts';
 import type { Assay } from '../metal/lot.ts';
-import type { CardEvent, CastLook, ChargeKind, ChargeLot, StopReason } from './card-event.ts';
+import type { CardEvent, CastLook, ChargeKind, ChargeLot, StopReason, Worker } from './card-event.ts';
 import type { CardFigures } from './card-figures.ts';
 import type { CardStep } from './card-step.ts';
+import type { Departure } from './variance.ts';
 
 /** What the metal of a charge must come to: the alloy's parts, and the least of the marked metal, parts per thousand. */
 export interface ChargeAlloy extends Assay {
   readonly markedMetal: 'Ag' | 'Au';
   readonly markPpt: number;
+}
+
+/** What a card asks of whoever does it, beside the metal's own figures. */
+export interface CardRules {
+  /** The instruction's steps that belong to this work, in order; which of them are asked depends on who does the card. */
+  readonly steps: readonly InstructionStep[];
+  readonly flaskCode: string;
+  /** How many times over its limit a departure wants a second person's sign. */
+  readonly countersignFactor: number;
 }
 
 /** What a running card is judged against; fixed when the card is opened. */
@@ -18,6 +29,8 @@ export interface CardContext {
   readonly plannedMetalG: Grams;
   /** Cards opened before lots were kept have none. */
   readonly alloy?: ChargeAlloy;
+  /** Cards opened before instructions had steps have none, and ask for no reasons. */
+  readonly rules?: CardRules;
   /** The units in which sentences are written. */
   readonly units: Units;
 }
@@ -25,23 +38,6 @@ export interface CardContext {
 /** A melt temperature with the moment it was read. */
 export interface Reading {
   readonly temperatureC: Celsius;
-  readonly at: string;
-}
-
-/** Something that went otherwise than the card says; marks the melt in the book. */
-export interface Departure {
-  readonly kind:
-    | 'reading-confirmed'
-    | 'flask-off-temperature'
-    | 'melt-off-window'
-    | 'poured-late'
-    | 'quenched-early'
-    | 'quenched-late'
-    | 'loss-over-limit'
-    | 'composition-off'
-    | 'cast-fault'
-    | 'work-stopped';
-  readonly sentence: string;
   readonly at: string;
 }
 
@@ -69,9 +65,21 @@ export interface ChargedLot extends ChargeLot {
   readonly massG: Grams;
 }
 
+/** How a step of the instruction was settled. */
+export interface SettledStep {
+  readonly at: string;
+  readonly how: 'done' | 'skipped';
+}
+
 /** Where a pour card stands: the fold of its events. */
 export interface CardState {
   readonly step: CardStep | 'done' | 'abandoned';
+  /** Since when the card is at this part; absent on records older than instructions with steps. */
+  readonly since?: string;
+  /** Who does the card; absent on records older than that question. */
+  readonly worker?: Worker;
+  /** The instruction's steps that are behind, by their keys. */
+  readonly settled?: Readonly<Record<string, SettledStep>>;
   readonly stopped: StopReason | null;
   readonly charge: Readonly<Record<ChargeKind, Grams>>;
   /** The part of the charge that was weighed in by lot; absent where none was. */

@@ -10,11 +10,13 @@ export interface StudioLimits {
   readonly furnaceMaxC: number;
   /** How far above the pour window a reading is questioned before it is stored, °C. */
   readonly questionAboveC: number;
+  /** How many times over its limit a departure wants a second person's sign. */
+  readonly countersignFactor: number;
 }
 
 /**
  * What a new studio begins with. Returns: 50 % (trade suppliers' published advice). Loss: 0.5 % (common practice, no source).
- * Charge tolerance, furnace maximum and questioning margin: the studio's own choice, no source.
+ * Charge tolerance, furnace maximum, questioning margin and countersign factor: the studio's own choice, no source.
  */
 export const defaultStudioLimits: StudioLimits = {
   chargeTolerance: 0.02,
@@ -22,4 +24,5 @@ export const defaultStudioLimits: StudioLimits = {
   lossShare: 0.005,
   furnaceMaxC: 1400,
   questionAboveC: 120,
+  countersignFactor: 1.5,
 };

@@ -1,4 +1,11 @@
-import type { CardEvent, CastLook, StopReason } from '#shared/domain/pour-card/card-event.ts';
+import type { StepAnswer } from '#shared/domain/instruction/instruction-step.ts';
+import type {
+  CardEvent,
+  CastLook,
+  PhotographSubject,
+  StopReason,
+} from '#shared/domain/pour-card/card-event.ts';
+import { varianceReasonNames } from '#shared/domain/pour-card/variance.ts';
 import { formatMass, formatTemperature, type Units } from '#shared/lib/units.ts';
 
 const looks: Readonly<Record<CastLook, string>> = {
@@ -16,6 +23,29 @@ const stops: Readonly<Record<StopReason, string>> = {
   other: 'another reason',
 };
 
+const photographed: Readonly<Record<PhotographSubject, string>> = {
+  tree: 'tree',
+  defect: 'defect',
+  other: 'work',
+};
+
+const answerWords = (answer: StepAnswer, { mass, temperature }: Units): string => {
+  switch (answer.kind) {
+    case 'weigh':
+      return `: ${formatMass(answer.massG, mass)}`;
+    case 'read':
+      return `: ${formatTemperature(answer.temperatureC, temperature)}`;
+    case 'scan':
+      return `: ${answer.code}`;
+    case 'choose':
+      return `: “${answer.option}”`;
+    case 'countersign':
+      return `, signed by ${answer.by.name}${answer.by.onDevice ? ' without the server' : ''}`;
+    default:
+      return '';
+  }
+};
+
 /** One entry of the melt book as a sentence, in the studio's units. */
 export const eventWords = (event: CardEvent, units: Units): string => {
   const mass = (grams: number): string => formatMass(grams, units.mass);
@@ -27,12 +57,22 @@ export const eventWords = (event: CardEvent, units: Units): string => {
       return 'Card carried on here.';
     case 'guard-confirmed':
       return `${event.prompts.length} safety points confirmed.`;
+    case 'checked':
+      return `${event.keys.length} ${event.keys.length === 1 ? 'point' : 'points'} checked.`;
+    case 'step-done':
+      return `Step “${event.key}” done${answerWords(event.answer, units)}.`;
+    case 'step-skipped':
+      return `Step “${event.key}” skipped.`;
+    case 'variance-explained':
+      return `Reason given: ${varianceReasonNames[event.reason].toLowerCase()}${event.words ? `, “${event.words}”` : ''}${event.by ? `; signed by ${event.by.name}` : ''}${event.hold ? '; pieces held' : ''}.`;
+    case 'photographed':
+      return `Photograph taken of the ${photographed[event.of]}.`;
     case 'charge-weighed':
       return `${mass(event.massG)} of ${event.kind} weighed in.`;
     case 'charge-taken-out':
       return `${mass(event.massG)} of ${event.kind} taken out.`;
     case 'charge-closed':
-      return 'Charge closed.';
+      return event.offPlan ? 'Charge closed off its plan.' : 'Charge closed.';
     case 'reading-taken':
       return `Melt read at ${degrees(event.temperatureC)}${event.confirmed ? ', questioned and confirmed' : ''}.`;
     case 'melt-ready':

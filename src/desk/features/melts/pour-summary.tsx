@@ -1,5 +1,5 @@
 import type { Melt } from '#shared/contracts/melt.ts';
-import { secondsBetween } from '#shared/domain/pour-card/apply-event.ts';
+import { secondsBetween } from '#shared/domain/pour-card/card-handler.ts';
 import { formatClock } from '#shared/lib/units.ts';
 import { DefinitionList, type Definition } from '#src/ui/definition-list.tsx';
 import { quenchWords } from '#src/desk/parts/quench-words.ts';

@@ -32,5 +32,12 @@ export const LimitFields = (part: FormPart) => (
       hint="So far above the pour window."
       {...part}
     />
+    <NumberField
+      path="limits.countersignFactor"
+      label="A second person signs for a departure"
+      unit="times its limit"
+      hint="An apprentice always asks for one."
+      {...part}
+    />
   </div>
 );
