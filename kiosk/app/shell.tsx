@@ -10,7 +10,10 @@ import { EnrolScreen } from '#kiosk/features/enrol/enrol-screen.tsx';
 import { SignInScreen } from '#kiosk/features/sign-in/sign-in-screen.tsx';
 import { MessageScreen } from '#kiosk/lib/message-screen.tsx';
 import { PresenceContext } from '#kiosk/lib/presence.ts';
-import { useOutbox, useOutboxView } from '#kiosk/outbox/outbox-context.ts';
+import { useOutbox } from '#kiosk/outbox/outbox-context.ts';
+import { usePhotographBox, useUndelivered } from '#kiosk/outbox/photograph-context.ts';
+import { usePaintedComfort } from '#kiosk/lib/comfort.ts';
+import { Alarms } from './alarms.tsx';
 import { useIdleLock } from './use-idle-lock.ts';
 
 interface SignedInProps {
@@ -21,7 +24,7 @@ interface SignedInProps {
 
 const SignedIn = ({ session: { studio }, person, terminal }: SignedInProps) => {
   const { mutate, isPending } = useSignOut();
-  const hasWaiting = useOutboxView().entries.length > 0;
+  const hasWaiting = useUndelivered() > 0;
   const signOut = (): void => {
     if (!hasWaiting && !isPending) mutate();
   };
@@ -43,11 +46,23 @@ const Gate = ({ session }: { readonly session: Session }) => {
 /** Decides what this device may show: enrolment, sign-in, or the work of the person signed in. */
 export const Shell = () => {
   useTheme();
+  usePaintedComfort();
   const { data: session, error, refetch, isFetching } = useSession();
   const outbox = useOutbox();
+  const photographs = usePhotographBox();
   const personId = session?.person?.id ?? null;
-  useEffect(() => outbox.setPerson(personId), [outbox, personId]);
-  if (session) return <Gate session={session} />;
+  useEffect(() => {
+    outbox.setPerson(personId);
+    photographs.setPerson(personId);
+  }, [outbox, photographs, personId]);
+  if (session) {
+    return (
+      <>
+        <Gate session={session} />
+        <Alarms />
+      </>
+    );
+  }
   if (!error) {
     return (
       <main className="grid h-dvh place-items-center bg-ground text-3xl font-black text-ink">

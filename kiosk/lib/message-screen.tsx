@@ -15,7 +15,7 @@ export interface MessageScreenProps {
 
 /** A whole screen for one message, large enough to be read from the furnace. */
 export const MessageScreen = ({ state, mark, sentence, children, actions }: MessageScreenProps) => (
-  <div className="grid h-dvh grid-rows-[minmax(0,1fr)_auto] gap-6 bg-ground px-8 pt-8 pb-7 text-ink">
+  <div className="grid fill-screen grid-rows-[minmax(0,1fr)_auto] gap-6 bg-ground px-8 pt-8 pb-7 text-ink">
     <main className="grid content-center gap-8 overflow-y-auto px-4">
       <StateMark state={state} text={mark} size="terminal" />
       <div role="alert">

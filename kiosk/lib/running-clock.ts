@@ -1,13 +1,15 @@
 import type { PourCard } from '#shared/contracts/card.ts';
 import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
+import { openSteps } from '#shared/domain/pour-card/apply-steps.ts';
 import { isOver, type CardContext, type CardState } from '#shared/domain/pour-card/card-state.ts';
 import { cardStepNames, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 import { secondsUntil } from '#shared/domain/pour-card/flask-cooling.ts';
 import { formatClock } from '#shared/lib/units.ts';
 
-/** What a card waits for: a pour before its window ends, or a quench between two moments. Milliseconds since the epoch. */
+/** What a card waits for: a pour before its window ends, a quench between two moments, or the end of a wait. Milliseconds since the epoch. */
 export type RunningTime =
   | { readonly kind: 'pour'; readonly fromMs: number; readonly untilMs: number }
+  | { readonly kind: 'wait'; readonly fromMs: number; readonly untilMs: number }
   | {
       readonly kind: 'quench';
       readonly fromMs: number;
@@ -32,6 +34,11 @@ export const pourWindowS = (startC: number, { figures }: Pick<CardContext, 'figu
   secondsUntil({ startC, roomC: figures.roomC, perSecond: figures.coolingPerSecond }, figures.flaskPourLowC);
 
 const timeOf = (state: CardState, context: CardContext): RunningTime | null => {
+  const [open] = openSteps(state, context);
+  if (open?.kind === 'wait' && state.since !== undefined) {
+    const fromMs = Date.parse(state.since);
+    return { kind: 'wait', fromMs, untilMs: fromMs + open.seconds * 1000 };
+  }
   if (state.step === 'pour' && state.flaskOut) {
     const fromMs = Date.parse(state.flaskOut.at);
     return { kind: 'pour', fromMs, untilMs: fromMs + pourWindowS(state.flaskOut.startC, context) * 1000 };
@@ -80,7 +87,7 @@ export interface ClockFace {
 }
 
 /** The last part of a window in which the clock turns urgent, s. */
-const urgentS = 30;
+export const urgentS = 30;
 
 const shareLeft = (fromMs: number, untilMs: number, nowMs: number): number =>
   untilMs > fromMs ? Math.min(1, Math.max(0, (untilMs - nowMs) / (untilMs - fromMs))) : 0;
@@ -111,8 +118,21 @@ const deadlineFace = (fromMs: number, untilMs: number, nowMs: number, verb: stri
   };
 };
 
+const waitFace = (fromMs: number, untilMs: number, nowMs: number): ClockFace => {
+  const isWaiting = nowMs < untilMs;
+  return {
+    clock: down(Math.max(0, untilMs - nowMs)),
+    words: isWaiting ? 'to wait' : 'the wait is over',
+    unit: isWaiting ? 'left' : '',
+    state: isWaiting ? 'wait' : 'ready',
+    isUrgent: false,
+    left: shareLeft(fromMs, untilMs, nowMs),
+  };
+};
+
 /** Reads a running time at `nowMs`. */
 export const clockFace = (time: RunningTime, nowMs: number): ClockFace => {
+  if (time.kind === 'wait') return waitFace(time.fromMs, time.untilMs, nowMs);
   if (time.kind === 'pour') return deadlineFace(time.fromMs, time.untilMs, nowMs, 'pour');
   const { fromMs, earliestMs, latestMs } = time;
   if (nowMs < earliestMs) {

@@ -15,7 +15,7 @@ const Face = ({ running, nowMs }: { readonly running: RunningClock; readonly now
       <span className={`text-[52px] leading-none font-black ${face.isUrgent ? 'text-ember' : ''}`}>
         {face.clock}
       </span>
-      <StateMark state={face.state} text={face.words} size="desk" />
+      <StateMark state={face.isUrgent ? 'caution' : face.state} text={face.words} size="desk" />
     </span>
   );
 };

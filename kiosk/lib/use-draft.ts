@@ -27,3 +27,13 @@ export const useDraft = <Value>(name: string, initial: Value): readonly [Value, 
   };
   return [value, change];
 };
+
+/** Forgets every draft of one card. */
+export const forgetDrafts = (meltId: string): void => {
+  try {
+    for (const key of Object.keys(window.sessionStorage))
+      if (key.startsWith('ladlemark.draft.') && key.includes(meltId)) window.sessionStorage.removeItem(key);
+  } catch {
+    // Blocked storage keeps no drafts.
+  }
+};

@@ -1,5 +1,12 @@
 import { queryOptions } from '@tanstack/react-query';
-import type { MeltEvent, OpenCardRequest, PourCard, RecordEventRequest } from '#shared/contracts/card.ts';
+import type {
+  CountersignMeltRequest,
+  MeltEvent,
+  OpenCardRequest,
+  PourCard,
+  RecordEventRequest,
+} from '#shared/contracts/card.ts';
+import type { Countersigned } from '#shared/domain/instruction/instruction-step.ts';
 import { http } from '#src/lib/http.ts';
 
 /** Looks up what a scanned or typed code means; rejects with the reason in one sentence. */
@@ -20,3 +27,7 @@ export const openCard = (castingId: string, request: OpenCardRequest): Promise<P
 /** Writes one event to the melt book; sending it again is harmless. */
 export const recordEvent = (meltId: string, request: RecordEventRequest): Promise<MeltEvent> =>
   http.post(`/api/melts/${meltId}/events`, request);
+
+/** Has another person sign for something on a melt; rejects with why the sign was not taken. */
+export const countersignMelt = (meltId: string, request: CountersignMeltRequest): Promise<Countersigned> =>
+  http.post(`/api/melts/${meltId}/countersigns`, request);

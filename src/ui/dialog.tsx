@@ -63,7 +63,7 @@ export const Dialog = ({
       onClick={(event) => {
         if (dismissible && event.target === event.currentTarget) onClose();
       }}
-      className="m-auto max-h-[94dvh] overflow-auto rounded-[26px] border-[3px] border-ink bg-panel p-0 text-ink"
+      className="m-auto max-h-[calc(94dvh/var(--zoom,1))] overflow-auto rounded-[26px] border-[3px] border-ink bg-panel p-0 text-ink"
     >
       <div className={`grid ${look.box}`}>
         <div className="flex items-start justify-between gap-6">

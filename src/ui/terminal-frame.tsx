@@ -45,7 +45,7 @@ export const TerminalFrame = (props: TerminalFrameProps) => {
   const main = useRef<HTMLElement>(null);
   const scrolls = useOverflows(main);
   return (
-    <div className="grid h-dvh grid-rows-[auto_minmax(0,1fr)_auto] gap-4 bg-ground px-8 pt-5 pb-7 text-ink">
+    <div className="grid fill-screen grid-rows-[auto_minmax(0,1fr)_auto] gap-4 bg-ground px-8 pt-5 pb-7 text-ink">
       <header className="flex min-h-18 items-center gap-5 text-2xl text-soft">
         <div className="flex flex-1 flex-wrap items-center gap-x-[22px] gap-y-1">{props.top}</div>
         <div className="shrink-0 text-ink">{props.stop}</div>

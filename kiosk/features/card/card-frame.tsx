@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { cardStepNames, cardSteps, hotSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 import type { CardState } from '#shared/domain/pour-card/card-state.ts';
 import { Button } from '#src/ui/button.tsx';
@@ -8,12 +8,21 @@ import { StopWork } from '#src/ui/stop-work.tsx';
 import { TerminalFrame, type TerminalFrameProps } from '#src/ui/terminal-frame.tsx';
 import { CardMenu } from './card-menu.tsx';
 import { CardTop } from './card-top.tsx';
+import { HandOver } from './hand-over.tsx';
+import { PhotographAside } from './photograph-aside.tsx';
 import { StopQuestion } from './stop-question.tsx';
 import type { RunningCard } from './use-running-card.ts';
 
+/** A screen that lies over the step for a while. */
+export type Aside = 'stop' | 'hand-over' | 'photograph';
+
 /** Props of {@link CardFrame}: a guided step's parts, and the card they belong to. */
-export interface CardFrameProps extends Omit<TerminalFrameProps, 'top' | 'stop' | 'tree'> {
+export interface CardFrameProps extends Omit<TerminalFrameProps, 'top' | 'stop' | 'tree' | 'actions'> {
   readonly running: RunningCard;
+  /** Buttons of size `terminal`, or what makes them when one of them opens an aside. */
+  readonly actions: ReactNode | ((ask: (aside: Aside) => void) => ReactNode);
+  /** Whether only a caster may take the card over. */
+  readonly handsOver?: boolean;
 }
 
 /** The buds of the tree for a card that stands at `step`. */
@@ -43,23 +52,49 @@ const RefusalDialog = ({ refusal, dismissRefusal }: Pick<RunningCard, 'refusal' 
   </Dialog>
 );
 
+interface AsideScreenProps {
+  readonly aside: Aside;
+  readonly running: RunningCard;
+  readonly top: ReactNode;
+  readonly onlyCasters: boolean;
+  readonly onDone: () => void;
+}
+
+const AsideScreen = ({ aside, running, top, onlyCasters, onDone }: AsideScreenProps) => {
+  switch (aside) {
+    case 'stop':
+      return (
+        <StopQuestion
+          top={top}
+          emergencyText={running.card.instruction.emergencyText}
+          onReason={(reason) => {
+            onDone();
+            running.record({ type: 'stopped', reason });
+          }}
+          onBack={onDone}
+        />
+      );
+    case 'hand-over':
+      return <HandOver running={running} top={top} onlyCasters={onlyCasters} onDone={onDone} />;
+    case 'photograph':
+      return <PhotographAside running={running} top={top} onDone={onDone} />;
+  }
+};
+
 /** One guided step of a running card, with the flask's strip, the tree, and stop work at hand on every hot step. */
-export const CardFrame = ({ running, ...parts }: CardFrameProps) => {
+export const CardFrame = ({ running, actions, handsOver = false, ...parts }: CardFrameProps) => {
   const { card, state, write } = running;
-  const [isStopping, setIsStopping] = useState(false);
+  const [aside, setAside] = useState<Aside | null>(null);
   const isHot = hotSteps.includes(state.step as CardStep) && state.stopped === null;
-  const menu = <CardMenu card={card} write={write} />;
   const top = <CardTop card={card} write={write} />;
-  if (isStopping && isHot) {
+  if (aside && (aside !== 'stop' || isHot)) {
     return (
-      <StopQuestion
+      <AsideScreen
+        aside={aside}
+        running={running}
         top={top}
-        emergencyText={card.instruction.emergencyText}
-        onReason={(reason) => {
-          setIsStopping(false);
-          running.record({ type: 'stopped', reason });
-        }}
-        onBack={() => setIsStopping(false)}
+        onlyCasters={handsOver}
+        onDone={() => setAside(null)}
       />
     );
   }
@@ -70,11 +105,12 @@ export const CardFrame = ({ running, ...parts }: CardFrameProps) => {
         top={top}
         stop={
           <span className="flex items-center gap-2">
-            {menu}
-            {isHot ? <StopWork onStop={() => setIsStopping(true)} /> : null}
+            <CardMenu card={card} write={write} running={running} onAside={setAside} />
+            {isHot ? <StopWork onStop={() => setAside('stop')} /> : null}
           </span>
         }
         tree={<CastingTree steps={treeSteps(state.step)} className="portrait:w-[110px]" />}
+        actions={typeof actions === 'function' ? actions(setAside) : actions}
       />
       <RefusalDialog refusal={running.refusal} dismissRefusal={running.dismissRefusal} />
     </>

@@ -54,7 +54,10 @@ export const CheckRun = ({ running }: { readonly running: RunningCard }) => {
   const open = openSteps(state, card.context);
   const run = openRun(open);
   const checks = run.filter(isCheck);
-  const [checked, setChecked] = useDraft<readonly string[]>(`checks.${card.melt.id}.${state.step}`, []);
+  const [checked, setChecked] = useDraft<readonly string[]>(
+    `checks.${card.melt.id}.${run[0]?.key ?? state.step}`,
+    [],
+  );
   const left = checks.filter(({ key }) => !checked.includes(key)).length;
   const endsGuard = state.step === 'guard' && run.length === open.length;
   const keys = run.map(({ key }) => key);

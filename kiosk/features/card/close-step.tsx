@@ -1,37 +1,22 @@
 import { useState } from 'react';
 import { castLooks, type CastLook } from '#shared/domain/pour-card/card-event.ts';
 import { chargedG } from '#shared/domain/pour-card/card-state.ts';
+import { ofClosing } from '#shared/domain/pour-card/departures.ts';
 import { Button } from '#src/ui/button.tsx';
-import { Dialog } from '#src/ui/dialog.tsx';
 import { HoldButton } from '#src/ui/hold-button.tsx';
 import { NumberPad } from '#src/ui/number-pad.tsx';
-import { TextAreaField } from '#src/ui/text-area-field.tsx';
+import { StateMark } from '#src/ui/state-mark.tsx';
+import { Choice } from '#kiosk/lib/choice.tsx';
 import { splitFigure } from '#kiosk/lib/unit-writer.ts';
 import { useDraft } from '#kiosk/lib/use-draft.ts';
 import { CardFrame } from './card-frame.tsx';
-import { emptyClosing, judgeClosing, lookWords, type ClosingDraft } from './closing-draft.ts';
+import { emptyClosing, judgeClosing, lookWords, type Closing, type ClosingDraft } from './closing-draft.ts';
 import type { RunningCard } from './use-running-card.ts';
+import { WordsDialog } from './words-dialog.tsx';
 
 type MassField = 'button' | 'loss';
 
 const massLabels: Readonly<Record<MassField, string>> = { button: 'Button', loss: 'Spill and loss' };
-
-interface ChoiceProps {
-  readonly isChosen: boolean;
-  readonly onChoose: () => void;
-  readonly children: React.ReactNode;
-}
-
-const Choice = ({ isChosen, onChoose, children }: ChoiceProps) => (
-  <button
-    type="button"
-    aria-pressed={isChosen}
-    onClick={onChoose}
-    className={`min-h-18 flex-1 touch-manipulation rounded-2xl border-[3px] border-ink px-2 text-xl font-black whitespace-nowrap select-none ${isChosen ? 'bg-ink text-ground' : 'bg-panel'}`}
-  >
-    {children}
-  </button>
-);
 
 const Looks = ({
   look,
@@ -49,35 +34,13 @@ const Looks = ({
   </div>
 );
 
-const NoteDialog = ({
-  note,
-  onNote,
-  onClose,
-}: {
-  note: string;
-  onNote: (note: string) => void;
-  onClose: () => void;
-}) => (
-  <Dialog
-    open
-    onClose={onClose}
-    title="Note on this melt"
-    size="terminal"
-    actions={
-      <Button kind="main" size="terminal" className="flex-1" onClick={onClose}>
-        Keep the note
-      </Button>
-    }
-  >
-    <TextAreaField
-      label="What should be remembered?"
-      value={note}
-      rows={5}
-      maxLength={2000}
-      onChange={(event) => onNote(event.target.value)}
-    />
-  </Dialog>
-);
+/** What is doubtful about a loss, in one sentence; null when it is within the studio's limit. */
+const doubtOf = (closing: Closing, metalInG: number, { card }: RunningCard): string | null => {
+  if (!closing.ready) return null;
+  // The moment does not matter to the sentence.
+  const departures = ofClosing(closing.event, metalInG, card.context, '');
+  return departures.find(({ kind }) => kind === 'loss-over-limit')?.sentence ?? null;
+};
 
 /** Out of the water: button, loss and look; metal in equals metal out before the card is closed. */
 export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
@@ -88,7 +51,13 @@ export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
   const unit = write.units.mass;
   const metalIn = chargedG(state);
   const closing = judgeClosing(draft, metalIn, unit);
+  const [isDoubted, setIsDoubted] = useState(false);
+  const doubt = doubtOf(closing, metalIn, running);
   const cast = closing.castG === null ? null : splitFigure(write.mass(closing.castG));
+  const change = (next: ClosingDraft): void => {
+    setIsDoubted(false);
+    setDraft(next);
+  };
   const massWords = (which: MassField): string =>
     `${massLabels[which]} ${draft[which] === '' ? '–' : draft[which]} ${unit}`;
   return (
@@ -98,12 +67,19 @@ export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
         sentence={card.instruction.sentences.close}
         number={cast?.figure ?? '–'}
         unit={unit}
+        state={
+          isDoubted && doubt ? (
+            <span role="alert">
+              <StateMark state="caution" text={doubt} size="desk" />
+            </span>
+          ) : undefined
+        }
         sub={`${write.mass(metalIn)} in, less button and loss.`}
         gauge={
           <NumberPad
             label={massLabels[field]}
             value={draft[field]}
-            onChange={(text) => setDraft({ ...draft, [field]: text })}
+            onChange={(text) => change({ ...draft, [field]: text })}
             onEnter={() => setField(field === 'button' ? 'loss' : 'button')}
             unit={unit}
             showValue={false}
@@ -111,12 +87,29 @@ export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
         }
         actions={
           <>
-            <Button size="terminal" icon="note" onClick={() => setIsNoting(true)}>
-              {draft.note.trim() === '' ? 'Add a note' : 'Change the note'}
-            </Button>
+            {isDoubted && doubt ? (
+              <Button
+                size="terminal"
+                icon="scale"
+                onClick={() => {
+                  setField('loss');
+                  change({ ...draft, loss: '' });
+                }}
+              >
+                Weigh it again
+              </Button>
+            ) : (
+              <Button size="terminal" icon="note" onClick={() => setIsNoting(true)}>
+                {draft.note.trim() === '' ? 'Add a note' : 'Change the note'}
+              </Button>
+            )}
             {closing.ready ? (
-              <HoldButton className="grow-2" onHeld={() => record(closing.event)}>
-                Hold to close the card
+              <HoldButton
+                key={String(isDoubted)}
+                className="grow-2"
+                onHeld={() => (doubt && !isDoubted ? setIsDoubted(true) : record(closing.event))}
+              >
+                {isDoubted && doubt ? 'Keep it. Hold, and give the reason' : 'Hold to close the card'}
               </HoldButton>
             ) : (
               <Button kind="blocked" size="terminal" className="grow-2">
@@ -138,9 +131,13 @@ export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
         </div>
       </CardFrame>
       {isNoting ? (
-        <NoteDialog
-          note={draft.note}
-          onNote={(note) => setDraft({ ...draft, note })}
+        <WordsDialog
+          title="Note on this melt"
+          label="What should be remembered?"
+          action="Keep the note"
+          words={draft.note}
+          maxLength={2000}
+          onWords={(note) => setDraft({ ...draft, note })}
           onClose={() => setIsNoting(false)}
         />
       ) : null}

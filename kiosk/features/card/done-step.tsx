@@ -1,5 +1,6 @@
-import { useNavigate } from 'react-router-dom';
+import { holdsPieces } from '#shared/domain/pour-card/apply-variance.ts';
 import { chargedG } from '#shared/domain/pour-card/card-state.ts';
+import { varianceReasonNames, type Departure } from '#shared/domain/pour-card/variance.ts';
 import { Button } from '#src/ui/button.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
@@ -24,7 +25,24 @@ const figuresOf = ({ state, write }: RunningCard) => {
   ];
 };
 
-const Departures = ({ running }: { readonly running: RunningCard }) => {
+const Variance = ({ departure }: { readonly departure: Departure }) => {
+  const { sentence, explained } = departure;
+  return (
+    <li className="border-t-[3px] border-line pt-2">
+      {sentence}
+      {explained ? (
+        <span className="block text-soft">
+          {varianceReasonNames[explained.reason]}
+          {explained.words === '' ? '' : `: ${explained.words}`}
+          {explained.by ? ` Signed by ${explained.by.name}.` : ''}
+          {explained.hold ? ' Pieces held.' : ''}
+        </span>
+      ) : null}
+    </li>
+  );
+};
+
+const Variances = ({ running }: { readonly running: RunningCard }) => {
   const { departures } = running.state;
   if (departures.length === 0) return <StateMark state="ready" text="As the card says" size="terminal" />;
   return (
@@ -38,10 +56,10 @@ const Departures = ({ running }: { readonly running: RunningCard }) => {
         }
         size="terminal"
       />
-      <div role="region" aria-label="Departures" tabIndex={0} className="max-h-44 overflow-y-auto p-1">
+      <div role="region" aria-label="Departures" tabIndex={0} className="max-h-64 overflow-y-auto p-1">
         <ul className="grid gap-2 text-2xl leading-snug">
-          {departures.map(({ sentence, kind, at }) => (
-            <li key={`${kind} ${at}`}>{sentence}</li>
+          {departures.map((departure) => (
+            <Variance key={`${departure.kind} ${departure.at}`} departure={departure} />
           ))}
         </ul>
       </div>
@@ -49,22 +67,26 @@ const Departures = ({ running }: { readonly running: RunningCard }) => {
   );
 };
 
+const sentenceOf = ({ card, state, practice }: RunningCard): string => {
+  if (practice) return 'The practice is over. Nothing of it is in the book.';
+  if (state.step === 'abandoned')
+    return `The card has ended as melt ${card.melt.code}. The casting is on hold.`;
+  return holdsPieces(state)
+    ? `Done. It is melt ${card.melt.code} in the book. Hold the pieces.`
+    : `Done. It is melt ${card.melt.code} in the book.`;
+};
+
 /** The card is over: where it stands in the melt book, and what went otherwise than planned. */
 export const DoneStep = ({ running }: { readonly running: RunningCard }) => {
-  const { card, state, write } = running;
-  const navigate = useNavigate();
+  const { state, write, practice, leave } = running;
   const isEnded = state.step === 'abandoned';
   const cast = state.closing ? splitFigure(write.mass(state.closing.castMassG)) : null;
   return (
     <CardFrame
       running={running}
-      sentence={
-        isEnded
-          ? `The card has ended as melt ${card.melt.code}. The casting is on hold.`
-          : `Done. It is melt ${card.melt.code} in the book.`
-      }
+      sentence={sentenceOf(running)}
       {...(cast ? { number: cast.figure, unit: cast.unit } : {})}
-      state={<Departures running={running} />}
+      state={<Variances running={running} />}
       sub={
         running.waiting > 0
           ? 'Not all of it has reached the server yet. It goes by itself; leave the terminal on.'
@@ -72,8 +94,8 @@ export const DoneStep = ({ running }: { readonly running: RunningCard }) => {
       }
       gauge={isEnded ? undefined : <DefinitionList items={figuresOf(running)} size="terminal" />}
       actions={
-        <Button kind="main" size="terminal" icon="scan" onClick={() => void navigate('/', { replace: true })}>
-          Next flask
+        <Button kind="main" size="terminal" icon={practice ? 'back' : 'scan'} onClick={leave}>
+          {practice ? (practice.kind === 'walk' ? 'End the practice' : 'Begin anew') : 'Next flask'}
         </Button>
       }
     />

@@ -17,7 +17,14 @@ export interface MassEntryProps {
   readonly actionWords: (mass: string) => string;
   /** Takes the mass in grams. */
   readonly onMass: (grams: number) => void;
-  readonly onCancel: () => void;
+  /** Leaves it; absent where the card waits for this mass. */
+  readonly onCancel?: () => void;
+  /** Another button, at the left of the actions. */
+  readonly other?: ReactNode;
+  /** Whether nothing at all is a mass too. */
+  readonly mayBeNone?: boolean;
+  /** What is doubtful about a mass in grams, in one sentence; null when nothing is. */
+  readonly doubt?: (grams: number) => string | null;
   readonly sub?: ReactNode;
   readonly children?: ReactNode;
 }
@@ -27,7 +34,9 @@ export const MassEntry = (props: MassEntryProps) => {
   const { running, label, onMass } = props;
   const unit = running.write.units.mass;
   const [text, setText] = useTypedText();
-  const read = readTypedMass(text, unit);
+  const read = readTypedMass(text, unit, props.mayBeNone);
+  const doubt = read.ok ? (props.doubt?.(read.value) ?? null) : null;
+  const wrong = text !== '' && !read.ok ? read.error : doubt;
   const send = (): void => {
     if (read.ok) onMass(read.value);
   };
@@ -39,7 +48,7 @@ export const MassEntry = (props: MassEntryProps) => {
       unit={unit}
       state={
         <span role="alert" className="block min-h-12">
-          {text !== '' && !read.ok ? <StateMark state="caution" text={read.error} size="desk" /> : null}
+          {wrong ? <StateMark state="caution" text={wrong} size="desk" /> : null}
         </span>
       }
       sub={props.sub}
@@ -55,11 +64,18 @@ export const MassEntry = (props: MassEntryProps) => {
       }
       actions={
         <>
-          <Button size="terminal" icon="back" onClick={props.onCancel}>
-            Back
-          </Button>
+          {props.other}
+          {props.onCancel ? (
+            <Button size="terminal" icon="back" onClick={props.onCancel}>
+              Back
+            </Button>
+          ) : null}
           <Button kind={read.ok ? 'main' : 'blocked'} size="terminal" className="grow-2" onClick={send}>
-            {read.ok ? props.actionWords(running.write.mass(read.value)) : 'Type a mass'}
+            {!read.ok
+              ? 'Type a mass'
+              : doubt
+                ? `Keep ${running.write.mass(read.value)} as it is`
+                : props.actionWords(running.write.mass(read.value))}
           </Button>
         </>
       }

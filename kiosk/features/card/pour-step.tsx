@@ -80,11 +80,20 @@ export const PourStep = ({ running }: { readonly running: RunningCard }) => {
       number={face.clock}
       unit={face.unit}
       state={
-        melt && !isPast ? (
-          <StateMark state={melt.state} text={melt.stateWords} size="terminal" />
-        ) : (
-          <StateMark state="caution" text={isPast ? 'Too late to pour' : 'No melt reading'} size="terminal" />
-        )
+        <span className="grid gap-3">
+          {face.isUrgent && !isPast ? (
+            <StateMark state="caution" text="The last 30 s of the window" size="terminal" />
+          ) : null}
+          {melt && !isPast ? (
+            <StateMark state={melt.state} text={melt.stateWords} size="terminal" />
+          ) : (
+            <StateMark
+              state="caution"
+              text={isPast ? 'Too late to pour' : 'No melt reading'}
+              size="terminal"
+            />
+          )}
+        </span>
       }
       sub={words.sub}
       gauge={

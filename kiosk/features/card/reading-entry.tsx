@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import { parseDecimal } from '#shared/lib/decimal.ts';
 import type { ReadingVerdict } from '#shared/domain/pour-card/judge-reading.ts';
 import { Button } from '#src/ui/button.tsx';
@@ -18,7 +18,13 @@ export interface ReadingEntryProps {
   readonly judge: (typed: number) => ReadingVerdict;
   /** Takes the temperature in °C; `confirmed` when a person stood by a doubtful one. */
   readonly onReading: (celsius: number, confirmed: boolean) => void;
-  readonly onCancel: () => void;
+  /** Leaves it; absent where the card waits for this reading. */
+  readonly onCancel?: () => void;
+  /** Another button, at the left of the actions. */
+  readonly other?: ReactNode;
+  readonly sub?: ReactNode;
+  /** Whether a doubtful reading may be stood by; a caster or the owner unless told otherwise. */
+  readonly mayConfirm?: boolean;
 }
 
 type Doubt = Exclude<ReadingVerdict, { readonly kind: 'accept' }>;
@@ -69,7 +75,8 @@ const MeantButton = ({ meant, onReading }: MeantButtonProps) => (
 );
 
 /** A temperature typed in the studio's unit: refused or questioned before it is stored, and kept while it is. */
-export const ReadingEntry = ({ running, sentence, label, judge, onReading, onCancel }: ReadingEntryProps) => {
+export const ReadingEntry = (props: ReadingEntryProps) => {
+  const { running, sentence, label, judge, onReading, onCancel } = props;
   const [text, setText] = useTypedText();
   const [doubt, setDoubt] = useState<Doubt | null>(null);
   const { degreeUnit } = running.write;
@@ -96,6 +103,7 @@ export const ReadingEntry = ({ running, sentence, label, judge, onReading, onCan
           {wrong ? <StateMark state="caution" text={wrong} size="terminal" /> : null}
         </span>
       }
+      sub={props.sub}
       gauge={
         <NumberPad
           label={label}
@@ -111,15 +119,18 @@ export const ReadingEntry = ({ running, sentence, label, judge, onReading, onCan
         doubt ? (
           <DoubtActions
             doubt={doubt}
-            mayConfirm={mayDecide(running.person)}
+            mayConfirm={props.mayConfirm ?? mayDecide(running.person)}
             onReading={onReading}
             onAgain={() => change('')}
           />
         ) : (
           <>
-            <Button size="terminal" icon="back" onClick={onCancel}>
-              Back
-            </Button>
+            {props.other}
+            {onCancel ? (
+              <Button size="terminal" icon="back" onClick={onCancel}>
+                Back
+              </Button>
+            ) : null}
             <Button kind={typed.ok ? 'main' : 'blocked'} size="terminal" className="grow-2" onClick={send}>
               {typed.ok ? `Take ${text} ${degreeUnit}` : 'Type a temperature'}
             </Button>

@@ -10,9 +10,10 @@ import { useRememberedClocks } from '#kiosk/lib/remembered-clocks.ts';
 import { RunningRow } from '#kiosk/lib/running-row.tsx';
 import { ScanPanel } from '#kiosk/lib/scan-panel.tsx';
 import { useServerNow } from '#kiosk/lib/server-clock.ts';
-import { ThemeButton } from '#kiosk/lib/theme-button.tsx';
+import { ComfortButton } from '#kiosk/lib/comfort-button.tsx';
 import { useScanner } from '#kiosk/lib/use-scanner.ts';
 import { WallClock } from '#kiosk/lib/wall-clock.tsx';
+import { PhotographBadge } from '#kiosk/outbox/photograph-badge.tsx';
 import { WaitingBadge } from '#kiosk/outbox/waiting-badge.tsx';
 import { PeopleTiles } from './people-tiles.tsx';
 import { PinEntry } from './pin-entry.tsx';
@@ -71,13 +72,14 @@ export const SignInScreen = ({ terminal }: SignInScreenProps) => {
     return true;
   });
   return (
-    <main className="grid h-dvh gap-8 bg-ground p-8 text-ink landscape:grid-cols-[minmax(0,470px)_minmax(0,1fr)] portrait:grid-rows-[auto_minmax(0,1fr)]">
+    <main className="grid fill-screen gap-8 bg-ground p-8 text-ink landscape:grid-cols-[minmax(0,470px)_minmax(0,1fr)] portrait:grid-rows-[auto_minmax(0,1fr)]">
       <div className="grid min-h-0 gap-6 landscape:grid-rows-[auto_minmax(0,1fr)_auto]">
         <WallClock nowMs={nowMs} place={terminal.bay} />
         {chosen ? <RunningHere /> : <ScanPanel onCode={takeCode} />}
         <div className="flex items-center gap-4">
-          <ThemeButton />
+          <ComfortButton />
           <WaitingBadge />
+          <PhotographBadge />
         </div>
       </div>
       <div className="grid min-h-0 content-start gap-6 overflow-y-auto p-1">

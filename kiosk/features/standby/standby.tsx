@@ -3,7 +3,9 @@ import { Link, useNavigate } from 'react-router-dom';
 import type { Casting } from '#shared/contracts/casting.ts';
 import { castingsQuery } from '#src/api/castings.ts';
 import { sentenceOf } from '#src/lib/http.ts';
+import { buttonClass } from '#src/ui/button-class.ts';
 import { Button } from '#src/ui/button.tsx';
+import { Icon } from '#src/ui/icon.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { Spinner } from '#src/ui/spinner.tsx';
 import { firstName, usePresence } from '#kiosk/lib/presence.ts';
@@ -11,11 +13,12 @@ import { RunningRow } from '#kiosk/lib/running-row.tsx';
 import { ScanPanel } from '#kiosk/lib/scan-panel.tsx';
 import { addressOfCode } from '#kiosk/lib/scan-target.ts';
 import { useServerNow } from '#kiosk/lib/server-clock.ts';
-import { ThemeButton } from '#kiosk/lib/theme-button.tsx';
+import { ComfortButton } from '#kiosk/lib/comfort-button.tsx';
 import { unitWriter } from '#kiosk/lib/unit-writer.ts';
 import { useScanner } from '#kiosk/lib/use-scanner.ts';
 import { WallClock } from '#kiosk/lib/wall-clock.tsx';
-import { useOutboxView } from '#kiosk/outbox/outbox-context.ts';
+import { PhotographBadge } from '#kiosk/outbox/photograph-badge.tsx';
+import { useUndelivered } from '#kiosk/outbox/photograph-context.ts';
 import { WaitingBadge } from '#kiosk/outbox/waiting-badge.tsx';
 import { CastingRow } from './casting-row.tsx';
 import { useOpenedCards } from './use-opened-cards.ts';
@@ -31,7 +34,7 @@ export const Standby = () => {
     return true;
   });
   return (
-    <main className="grid h-dvh gap-8 bg-ground p-8 text-ink landscape:grid-cols-[minmax(0,470px)_minmax(0,1fr)] portrait:grid-rows-[auto_minmax(0,1fr)]">
+    <main className="grid fill-screen gap-8 bg-ground p-8 text-ink landscape:grid-cols-[minmax(0,470px)_minmax(0,1fr)] portrait:grid-rows-[auto_minmax(0,1fr)]">
       <h1 className="sr-only">Standby</h1>
       <div className="grid min-h-0 gap-6 landscape:grid-rows-[auto_minmax(0,1fr)_auto]">
         <WallClock nowMs={nowMs} place={`${terminal.bay} · ${firstName(person.name)}`} />
@@ -45,10 +48,10 @@ export const Standby = () => {
 
 const Who = () => {
   const { signOut } = usePresence();
-  const isWaiting = useOutboxView().entries.length > 0;
+  const isWaiting = useUndelivered() > 0;
   return (
     <div className="terminal-actions">
-      <ThemeButton />
+      <ComfortButton />
       <Button
         size="terminal"
         icon="lock"
@@ -67,6 +70,7 @@ const Work = ({ nowMs }: { readonly nowMs: number }) => {
   return (
     <div className="min-h-0 overflow-y-auto p-1" tabIndex={0} role="region" aria-label="Work at this bay">
       <WaitingBadge />
+      <PhotographBadge />
       {error && castings ? <p className="text-xl font-bold text-soft">{sentenceOf(error)}</p> : null}
       {castings ? (
         <Lists castings={castings} nowMs={nowMs} />
@@ -132,6 +136,13 @@ const Lists = ({ castings, nowMs }: { readonly castings: readonly Casting[]; rea
           </p>
         ) : null}
       </section>
+      <Link
+        to="/practice"
+        className={buttonClass({ size: 'terminal' }, 'justify-self-start !min-h-18 !gap-3 !px-5 text-[24px]')}
+      >
+        <Icon name="note" />
+        Practise a card
+      </Link>
     </div>
   );
 };

@@ -1,0 +1,48 @@
+import { useEffect, useRef, useState } from 'react';
+import { StateMark } from '#src/ui/state-mark.tsx';
+import { warningsBetween, type ClockWarning } from '#kiosk/lib/clock-warning.ts';
+import { useRememberedClocks } from '#kiosk/lib/remembered-clocks.ts';
+import { useServerNow } from '#kiosk/lib/server-clock.ts';
+import { playSignal, wakeSignalsByTouch } from '#kiosk/lib/signals.ts';
+import { useWakeLock } from '#kiosk/lib/use-wake-lock.ts';
+
+/** How long a warning stands over the screen, ms. */
+const standsMs = 10_000;
+
+/**
+ * Warns of what falls due on the cards that run at this terminal, whatever screen is open and whoever is signed in: by
+ * a signal, by a shape and by words that are read out. It lies at the top edge, takes no touch and hides no action.
+ */
+export const Alarms = () => {
+  const clocks = useRememberedClocks();
+  const nowMs = useServerNow(250);
+  const lookedMs = useRef(nowMs);
+  const [warning, setWarning] = useState<ClockWarning | null>(null);
+  useWakeLock(clocks.length > 0);
+  useEffect(() => wakeSignalsByTouch(), []);
+  useEffect(() => {
+    const due = warningsBetween(clocks, lookedMs.current, nowMs).at(-1);
+    lookedMs.current = nowMs;
+    if (!due) return;
+    playSignal(due.signal);
+    setWarning(due);
+  }, [clocks, nowMs]);
+  const isShown = warning !== null && nowMs - warning.atMs < standsMs;
+  return (
+    <div
+      role="alert"
+      className="pointer-events-none fixed inset-x-0 top-2 z-10 flex justify-center"
+      data-signal={isShown ? warning.signal : undefined}
+    >
+      {isShown ? (
+        <span className="rounded-full border-[4px] border-ink bg-ground px-8 py-3 text-ink">
+          <StateMark
+            state={warning.signal === 'open' ? 'ready' : 'caution'}
+            text={warning.words}
+            size="terminal"
+          />
+        </span>
+      ) : null}
+    </div>
+  );
+};
