@@ -31,7 +31,8 @@ interface SeenProps {
 const Seen = ({ stream, onVideo }: SeenProps) => (
   <video
     ref={(video) => {
-      if (video) video.srcObject = stream;
+      // Set anew it would begin anew, and blink.
+      if (video && video.srcObject !== stream) video.srcObject = stream;
       onVideo(video);
     }}
     autoPlay
