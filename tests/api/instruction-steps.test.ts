@@ -157,9 +157,11 @@ describe('the steps of an instruction', () => {
     await sendAll([done('hold', { kind: 'wait' }), { type: 'flask-out', furnaceC: null }]);
   });
 
-  it('are skipped by a caster where that is allowed, and it counts as a departure', async () => {
+  it('are skipped by a caster where that is allowed, and count as a measurement missing', async () => {
     await sendAll([guarded, { type: 'checked', keys: ['crucible'] }, { type: 'step-skipped', key: 'flux' }]);
-    expect((await state()).departures).toMatchObject([{ kind: 'step-skipped', isMajor: true }]);
+    expect((await state()).departures).toMatchObject([
+      { kind: 'instrument-missing', sentence: 'Not measured: Weigh the flux.', isMajor: true },
+    ]);
     await sendAll(toMelt.slice(3));
     expect(sentenceOf(await send({ type: 'step-skipped', key: 'same' }))).toContain('lets nobody skip');
   });
