@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import type { Countersigned } from '#shared/domain/instruction/instruction-step.ts';
 import type { LotDetail } from '#shared/contracts/lot.ts';
 import type { AlloyRevision } from '#server/models/alloy-revision.ts';
 import type { Lot } from '#server/models/lot.ts';
@@ -7,6 +8,7 @@ import type { Melt } from '#server/models/melt.ts';
 import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
 import { buildCasting, PLANNED_G } from '#tests/factories/build-casting.ts';
 import { buildLot, quarantineLot } from '#tests/factories/build-lot.ts';
+import { PIN } from '#tests/factories/build-user.ts';
 import { chargeOf, meltAtCharge, snapshotOf } from '#tests/support/charge-by-lot.ts';
 import { deliverEvent } from '#tests/support/deliver-event.ts';
 import { problemIdOf, sentenceOf } from '#tests/support/problem-id.ts';
@@ -213,14 +215,31 @@ describe('closing a melt by lots', () => {
     expect((await readLot(button.id)).melts).toEqual([]);
   });
 
-  it('wants a note for a loss over the limit', async () => {
+  it('takes a loss over the limit as it is, and wants its reason before the card is done', async () => {
     const lot = await buildLot(server.services);
     const meltId = await cardAtCharge();
     await send(meltId, chargeOf(lot, 100)).expect(201);
     await pourOut(meltId);
-    const close = { type: 'closed', buttonMassG: 10, lossMassG: 3, look: 'full', note: '' };
-    expect(sentenceOf(await send(meltId, close))).toContain('More is lost than the studio allows');
-    await send(meltId, { ...close, note: 'Spilt on the hearth; sweepings kept.' }).expect(201);
+    await send(meltId, { type: 'closed', buttonMassG: 10, lossMassG: 3, look: 'full', note: '' }).expect(201);
+    const stepNow = async () =>
+      (await server.services.models.Melt.findByPk(meltId, { rejectOnEmpty: true })).state.step;
+    expect(await stepNow()).toBe('close');
+    const button = await server.services.models.Lot.findOne({ where: { meltId }, rejectOnEmpty: true });
+    expect(button.balanceMg).toBe(10_000);
+    const reason = {
+      type: 'variance-explained',
+      index: 0,
+      reason: 'mistake',
+      words: 'Spilt on the hearth.',
+      hold: false,
+    };
+    expect(sentenceOf(await send(meltId, { ...reason, by: null }))).toContain('A second person has to sign');
+    const sign = await here.client
+      .post(`/api/melts/${meltId}/countersigns`)
+      .send({ personId: owner.user.id, pin: PIN })
+      .expect(201);
+    await send(meltId, { ...reason, by: sign.body as Countersigned }).expect(201);
+    expect(await stepNow()).toBe('done');
   });
 
   it('leaves the metal of an ended card in its crucible until the desk closes it out', async () => {

@@ -38,6 +38,7 @@ describe('adding a person', () => {
       active: true,
       hasPin: true,
       pinLocked: false,
+      apprenticeship: { alloyIds: null, parts: null },
       abilities: { update: true, unlock: false },
     });
     expect(response.text).not.toMatch(/hash|scrypt|445566/i);

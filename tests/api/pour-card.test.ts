@@ -209,11 +209,8 @@ describe('the close', () => {
   it('marks a loss over the limit and a fault, and keeps the note', async () => {
     await close({ lossMassG: 2, look: 'porous', note: '  Two pits.  ' }).expect(201);
     const { state } = await readMelt();
-    expect(state.departures.map(({ kind }) => kind)).toEqual([
-      'quenched-early',
-      'loss-over-limit',
-      'cast-fault',
-    ]);
+    expect(state.departures.map(({ kind }) => kind)).toEqual(['loss-over-limit', 'cast-fault']);
+    expect(state.step).toBe('close');
     expect(state.closing).toMatchObject({ castMassG: 88, note: 'Two pits.' });
   });
 });

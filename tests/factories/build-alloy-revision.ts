@@ -53,7 +53,8 @@ export const buildAlloyRevision = async (
     compositionWt,
     fineness: 925,
     ...figuresFor(compositionWt, overrides.measured ?? null),
-    quench: { earliestS: 900, latestS: null, medium: 'water', why: 'Let it set through.', source: 'Test.' },
+    // At once, so that a built card is quenched in time although its clock stands still.
+    quench: { earliestS: 0, latestS: null, medium: 'water', why: 'Let it set through.', source: 'Test.' },
     measured: null,
     ...overrides,
     ...approval(overrides, draftedBy),

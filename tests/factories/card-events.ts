@@ -1,7 +1,7 @@
 import type { CardEvent } from '#shared/domain/pour-card/card-event.ts';
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
-import { defaultSteps } from '#shared/domain/instruction/default-steps.ts';
 import { stepsBefore } from '#shared/domain/instruction/step-applies.ts';
+import { guardOnly } from './build-studio.ts';
 import { cardSteps, type CardStep } from '#shared/domain/pour-card/card-step.ts';
 
 /** A step a built card can be led to. */
@@ -9,12 +9,10 @@ export type ReachableStep = CardStep | 'done';
 
 type Planned = Pick<CardContext, 'figures' | 'plannedMetalG' | 'rules'>;
 
-/** The guard with every caution of the default instruction confirmed that every card has. */
+/** The guard with every caution confirmed that a built studio's cards have. */
 export const guarded = {
   type: 'guard-confirmed',
-  prompts: stepsBefore(defaultSteps, 'guard', 'caster')
-    .filter(({ when }) => when.hazards.length === 0)
-    .map(({ key }) => key),
+  prompts: guardOnly.steps.map(({ key }) => key),
 } as const satisfies CardEvent;
 
 /** What is read and touched before a part of the card, as the card itself has it. */

@@ -112,6 +112,16 @@ export const buildRequestTargets = async (
       client: terminal,
       good: { ...stamp, event: { type: 'charge-weighed', kind: 'grain', massG: 1 } },
     },
+    'post /api/melts/:id/countersigns': {
+      path: `/api/melts/${melt.id}/countersigns`,
+      client: terminal,
+      good: { personId: person.id, pin: '000000' },
+    },
+    'post /api/melts/:id/photographs': {
+      path: `/api/melts/${melt.id}/photographs?id=${randomUUID()}`,
+      client: terminal,
+      good: {},
+    },
     'post /api/melts/:id/amendments': {
       path: `/api/melts/${melt.id}/amendments`,
       client: owner,

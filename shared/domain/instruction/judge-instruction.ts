@@ -1,5 +1,5 @@
 import { cardSteps, cardStepNames } from '../pour-card/card-step.ts';
-import type { InstructionStep } from './instruction-step.ts';
+import type { InstructionStep, StepConditions } from './instruction-step.ts';
 import type { WorkInstruction } from './work-instruction.ts';
 
 /** A fault of an instruction, at the step it is found in; null for the instruction as a whole. */
@@ -39,13 +39,15 @@ const order = (steps: readonly InstructionStep[]): readonly InstructionFault[] =
     : [];
 };
 
+const isForEveryone = ({ methods, families, roles, hazards }: StepConditions): boolean =>
+  [methods, families, roles, hazards].every((list) => list.length === 0);
+
 /** The faults that keep an instruction from being approved; none when it may be. */
 export const judgeInstruction = ({ steps }: WorkInstruction): readonly InstructionFault[] => {
   const keys = steps.map(({ key }) => key);
   const twice = steps.find(({ key }, i) => keys.indexOf(key) !== i);
   const unguarded = !steps.some(
-    ({ before, kind, when }) =>
-      before === 'guard' && kind === 'check' && Object.values(when).every((list) => list.length === 0),
+    ({ before, kind, when }) => before === 'guard' && kind === 'check' && isForEveryone(when),
   );
   return [
     ...(unguarded

@@ -1,10 +1,11 @@
 import { ok, refuse } from '#shared/lib/result.ts';
-import type { InstructionStep } from '../instruction/instruction-step.ts';
+import type { InstructionStep, StepKind } from '../instruction/instruction-step.ts';
 import { judgeAnswer } from '../instruction/judge-answer.ts';
 import { stepsBefore } from '../instruction/step-applies.ts';
 import { isOver, type CardContext, type CardState, type SettledStep } from './card-state.ts';
 import type { CardStep } from './card-step.ts';
 import { secondsBetween, type Handler } from './card-handler.ts';
+import type { Departure } from './variance.ts';
 
 /** The steps of the instruction that are still open before the card's present part, in order. */
 export const openSteps = (
@@ -69,18 +70,21 @@ export const doStep: Handler<'step-done'> = (state, { key, answer }, context, at
   return ok({ ...settled, departures: [...state.departures, departure] });
 };
 
+/** What takes an instrument, and is not done, is a measurement missing. */
+const measured: readonly StepKind[] = ['weigh', 'read', 'photograph'];
+
+const skipped = ({ kind, sentence }: InstructionStep): Pick<Departure, 'kind' | 'sentence'> =>
+  measured.includes(kind)
+    ? { kind: 'instrument-missing', sentence: `Not measured: ${sentence}` }
+    : { kind: 'step-skipped', sentence: `Skipped: ${sentence}` };
+
 /** Leaves a step out; a caster may where the instruction allows it, an apprentice never. */
 export const skipStep: Handler<'step-skipped'> = (state, { key }, context, at) => {
   const [step] = openSteps(state, context);
   if (step?.key !== key) return refuse('That is not what the card asks for now.');
   if (state.worker?.role === 'apprentice') return refuse('An apprentice skips no step. Ask a caster.');
   if (!step.maySkip) return refuse('The instruction lets nobody skip this step.');
-  const departure = {
-    kind: 'step-skipped',
-    sentence: `Skipped: ${step.sentence}`,
-    at,
-    isMajor: true,
-  } as const;
+  const departure = { ...skipped(step), at, isMajor: true };
   return ok({
     ...settle(state, [key], { at, how: 'skipped' }),
     departures: [...state.departures, departure],
