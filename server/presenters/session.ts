@@ -19,6 +19,7 @@ export const presentSession = (actor: Actor, studio: StudioSettings, now: Date):
     units: { temperature: studio.temperatureUnit, mass: studio.massUnit },
     idleLockS: studio.idleLockS,
     timeZone: studio.timeZone,
+    marksPlace: studio.marksPlace,
   },
   abilities: {
     seeDesk: can(sessionPolicy.seeDesk, actor, undefined),

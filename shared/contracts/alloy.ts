@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { alloyFamilies, type AlloyFamily } from '#shared/domain/alloy/alloy-family.ts';
 import type { AlloyFigures } from '#shared/domain/alloy/alloy-figures.ts';
 import type { QuenchRule } from '#shared/domain/alloy/quench-rule.ts';
+import { exactWhole, isWhole, sumOfWt } from '#shared/lib/whole-range.ts';
 import { temperatureC, words, type Abilities } from './common.ts';
 
 const symbol = z.string().regex(/^[A-Z][a-z]?$/, 'Use element symbols, such as Ag.');
@@ -10,7 +11,7 @@ const percent = z.number().min(0, 'Not below 0.').max(100, 'Not above 100.');
 const compositionWt = z
   .record(symbol, percent)
   .refine((wt) => Object.keys(wt).length > 0 && Object.keys(wt).length <= 12, 'Give one to twelve elements.')
-  .refine((wt) => Math.abs(Object.values(wt).reduce((sum, part) => sum + part, 0) - 100) <= 0.005, {
+  .refine((wt) => isWhole(sumOfWt(Object.values(wt)), exactWhole), {
     error: 'The parts must come to 100 wt%.',
   });
 

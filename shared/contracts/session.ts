@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import type { MarkPlace } from '#shared/domain/metal/fineness-marks.ts';
 import type { Role } from '#shared/domain/people/role.ts';
 import type { Units } from '#shared/lib/units.ts';
 import type { Abilities } from './common.ts';
@@ -45,6 +46,8 @@ export interface Session {
     readonly units: Units;
     readonly idleLockS: number;
     readonly timeZone: string;
+    /** Whose fineness marks the studio works to. */
+    readonly marksPlace: MarkPlace;
   };
   readonly abilities: Abilities<(typeof deskAbilities)[number]>;
   /** The server's clock, ISO 8601: terminals keep the offset. */

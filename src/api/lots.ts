@@ -9,8 +9,7 @@ import type {
   ReceiveLotRequest,
   releaseLotRequest,
 } from '#shared/contracts/lot.ts';
-import type { Problem } from '#shared/contracts/problem.ts';
-import { http, ProblemError, UnreachableError } from '#src/lib/http.ts';
+import { http } from '#src/lib/http.ts';
 
 /** The lots with metal on hand, or those that are used up; the oldest first. */
 export const lotsQuery = (onHand: 'yes' | 'no') =>
@@ -63,36 +62,11 @@ export const useDispatchLot = (id: string) =>
 export const lotDocumentPath = (lotId: string, documentId: string): string =>
   `/api/lots/${lotId}/documents/${documentId}`;
 
-/** A scanned certificate takes longer than a line of words over a workshop's network. */
-const uploadTakesAtMostMs = 120_000;
-
-const sendFile = async (path: string, file: File): Promise<Response> => {
-  try {
-    return await fetch(path, {
-      method: 'POST',
-      credentials: 'same-origin',
-      headers: {
-        Accept: 'application/json',
-        'Content-Type': 'application/octet-stream',
-        'Ladlemark-Place': 'desk',
-      },
-      body: file,
-      signal: AbortSignal.timeout(uploadTakesAtMostMs),
-    });
-  } catch {
-    throw new UnreachableError();
-  }
-};
-
-const addDocument = async (lotId: string, file: File): Promise<LotDetail> => {
-  const name = encodeURIComponent(file.name.slice(-120));
-  const response = await sendFile(`/api/lots/${lotId}/documents?name=${name}`, file);
-  const answer: unknown = await response.json().catch(() => {
-    throw new UnreachableError();
-  });
-  if (!response.ok) throw new ProblemError(answer as Problem);
-  return answer as LotDetail;
-};
-
 /** Keeps a certificate or photograph of a lot: a PDF, JPEG, PNG or WebP file of at most 10 MB. */
-export const useAddLotDocument = (lotId: string) => useLotChange((file: File) => addDocument(lotId, file));
+export const useAddLotDocument = (lotId: string) =>
+  useLotChange((file: File) =>
+    http.upload<LotDetail>(
+      `/api/lots/${lotId}/documents?name=${encodeURIComponent(file.name.slice(-120))}`,
+      file,
+    ),
+  );

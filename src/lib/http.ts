@@ -40,8 +40,30 @@ export const sentenceOf = (error: unknown): string =>
     : 'Something went wrong on this page. Load it again.';
 
 const giveUpAfterMs = 15_000;
+/** A scanned page takes longer than a line of words over a workshop's network. */
+const giveUpUploadAfterMs = 120_000;
 
-const send = async (method: string, path: string, body: unknown): Promise<Response> => {
+/** What a request carries, how it is written, and how long it may take. */
+interface Content {
+  readonly type?: string;
+  readonly body?: BodyInit;
+  readonly timeoutMs: number;
+}
+
+const nothing: Content = { timeoutMs: giveUpAfterMs };
+
+const asJson = (body: unknown): Content =>
+  body === undefined
+    ? nothing
+    : { type: 'application/json', body: JSON.stringify(body), timeoutMs: giveUpAfterMs };
+
+const asFile = (file: Blob): Content => ({
+  type: 'application/octet-stream',
+  body: file,
+  timeoutMs: giveUpUploadAfterMs,
+});
+
+const send = async (method: string, path: string, { type, body, timeoutMs }: Content): Promise<Response> => {
   try {
     return await fetch(path, {
       method,
@@ -49,10 +71,10 @@ const send = async (method: string, path: string, body: unknown): Promise<Respon
       headers: {
         Accept: 'application/json',
         'Ladlemark-Place': place,
-        ...(body === undefined ? {} : { 'Content-Type': 'application/json' }),
+        ...(type === undefined ? {} : { 'Content-Type': type }),
       },
-      signal: AbortSignal.timeout(giveUpAfterMs),
-      ...(body === undefined ? {} : { body: JSON.stringify(body) }),
+      signal: AbortSignal.timeout(timeoutMs),
+      ...(body === undefined ? {} : { body }),
     });
   } catch {
     throw new UnreachableError();
@@ -68,8 +90,8 @@ const readJson = async (response: Response): Promise<unknown> => {
   }
 };
 
-const request = async <Answer>(method: string, path: string, body?: unknown): Promise<Answer> => {
-  const response = await send(method, path, body);
+const request = async <Answer>(method: string, path: string, content: Content): Promise<Answer> => {
+  const response = await send(method, path, content);
   if (response.status === 204) return undefined as Answer;
   const answer = await readJson(response);
   if (!response.ok) throw new ProblemError(answer as Problem);
@@ -78,7 +100,9 @@ const request = async <Answer>(method: string, path: string, body?: unknown): Pr
 
 /** Requests to our own API; rejects with a ProblemError or an UnreachableError. */
 export const http = {
-  get: <Answer>(path: string): Promise<Answer> => request('GET', path),
-  post: <Answer>(path: string, body?: unknown): Promise<Answer> => request('POST', path, body),
-  patch: <Answer>(path: string, body: unknown): Promise<Answer> => request('PATCH', path, body),
+  get: <Answer>(path: string): Promise<Answer> => request('GET', path, nothing),
+  post: <Answer>(path: string, body?: unknown): Promise<Answer> => request('POST', path, asJson(body)),
+  patch: <Answer>(path: string, body: unknown): Promise<Answer> => request('PATCH', path, asJson(body)),
+  /** Sends a file as it is, as the whole body; two minutes at most. */
+  upload: <Answer>(path: string, file: Blob): Promise<Answer> => request('POST', path, asFile(file)),
 };

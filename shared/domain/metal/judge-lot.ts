@@ -1,4 +1,5 @@
-import type { Assay, LotKind, Parts } from './lot.ts';
+import { isWhole, sumOfWt, type WholeRange } from '#shared/lib/whole-range.ts';
+import type { Assay, LotKind } from './lot.ts';
 import { metalName } from './metal-name.ts';
 
 /** A fault of what was typed about a lot, at its field. */
@@ -15,12 +16,15 @@ const sumSlackWt = 0.05;
 /** Fine metal is certified by its purity alone: the rest, at most this much, stands for nothing. */
 const finestRestWt = 1;
 
-const sumOf = (parts: Parts): number => Object.values(parts).reduce((sum, wt) => sum + wt, 0);
+/** Between which sums the parts of a lot's certificate count as whole. */
+export const wholeOfLot = (kind: LotKind | ''): WholeRange => ({
+  least: 100 - (kind === 'fine' ? finestRestWt : sumSlackWt),
+  most: 100 + sumSlackWt,
+});
 
 const compositionFault = (kind: LotKind, { compositionWt }: Assay): LotFault | null => {
-  const sum = sumOf(compositionWt);
-  const rest = kind === 'fine' ? finestRestWt : sumSlackWt;
-  if (sum <= 100 + sumSlackWt && sum >= 100 - rest) return null;
+  const sum = sumOfWt(Object.values(compositionWt));
+  if (isWhole(sum, wholeOfLot(kind))) return null;
   const wanted = kind === 'fine' ? 'between 99 and 100 wt%' : 'to 100 wt%';
   return fault('compositionWt', `The parts come to ${sum.toFixed(2)} wt%; they must come ${wanted}.`);
 };

@@ -1,7 +1,7 @@
 import { Link, Outlet, ScrollRestoration } from 'react-router-dom';
 import { Wordmark } from '#src/ui/wordmark.tsx';
 import { AccountBar } from './account-bar.tsx';
-import { SiteNavigation } from './site-navigation.tsx';
+import { SiteGroups, SitePlaces } from './site-navigation.tsx';
 
 /** The frame of every page at the desk: wordmark, navigation, who is signed in, and the page itself. */
 export const Shell = () => (
@@ -12,16 +12,19 @@ export const Shell = () => (
     >
       Skip to the page
     </a>
-    <header className="screen-only flex flex-wrap items-center gap-x-8 gap-y-2 pt-5 pb-7">
-      <Link to="/" className="rounded-lg" aria-label="Ladlemark, today">
-        <Wordmark />
-      </Link>
-      <div className="order-3 w-full xl:order-none xl:w-auto">
-        <SiteNavigation />
+    <header className="screen-only grid gap-2 pt-5 pb-10">
+      <div className="flex flex-wrap items-center gap-x-7 gap-y-2">
+        <Link to="/" className="rounded-lg" aria-label="Ladlemark, today">
+          <Wordmark />
+        </Link>
+        <div className="order-3 w-full lg:order-none lg:w-auto">
+          <SiteGroups />
+        </div>
+        <div className="ml-auto">
+          <AccountBar />
+        </div>
       </div>
-      <div className="ml-auto">
-        <AccountBar />
-      </div>
+      <SitePlaces />
     </header>
     <main id="page" tabIndex={-1} className="pb-24 outline-none">
       <Outlet />

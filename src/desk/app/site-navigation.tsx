@@ -1,58 +1,80 @@
-import { NavLink } from 'react-router-dom';
-import type { Role } from '#shared/domain/people/role.ts';
+import { Link, useLocation } from 'react-router-dom';
 import { cx } from '#src/ui/cx.ts';
-import { useDeskSession, type DeskSession } from '../parts/desk-session.ts';
+import { useDeskSession } from '../parts/desk-session.ts';
+import { offeredGroups, placeAt, type SiteGroup, type SitePlace } from './site-places.ts';
 
-interface Place {
-  readonly to: string;
-  readonly name: string;
-  /** The ability without which the place is not offered. */
-  readonly needs?: keyof DeskSession['abilities'];
-  /** The roles to which the place is offered; to all where none is named. */
-  readonly roles?: readonly Role[];
-}
+/** Where the person is, and what is offered to them. */
+const useSite = () => {
+  const { pathname } = useLocation();
+  const groups = offeredGroups(useDeskSession());
+  const place = placeAt(pathname);
+  return { groups, place, group: groups.find(({ places }) => places.some(({ to }) => to === place?.to)) };
+};
 
-const places: readonly Place[] = [
-  { to: '/', name: 'Today' },
-  { to: '/melts', name: 'Melt book' },
-  { to: '/alloys', name: 'Alloys' },
-  { to: '/metal', name: 'Metal', roles: ['owner', 'caster'] },
-  { to: '/flasks', name: 'Flasks' },
-  { to: '/people', name: 'People', needs: 'managePeople' },
-  { to: '/terminals', name: 'Terminals', needs: 'manageTerminals' },
-  { to: '/studio', name: 'Studio', needs: 'editStudio' },
-];
+const GroupLink = ({ group, isHere }: { readonly group: SiteGroup; readonly isHere: boolean }) => (
+  <Link
+    to={group.places[0]?.to ?? '/'}
+    aria-current={isHere ? 'true' : undefined}
+    className={cx(
+      'inline-flex min-h-11 items-center rounded-full border-[2.5px] px-4 text-[17px] font-extrabold',
+      isHere ? 'border-ink bg-panel text-ink' : 'border-transparent text-soft hover:text-ink',
+    )}
+  >
+    {group.name}
+  </Link>
+);
 
-const isOffered = ({ needs, roles }: Place, { abilities, person }: DeskSession): boolean =>
-  (needs === undefined || abilities[needs]) &&
-  (roles === undefined || roles.some((role) => person.roles.includes(role)));
-
-/** The places of the desk that this person may open. */
-export const SiteNavigation = () => {
-  const session = useDeskSession();
+/** The desk's groups of places; each leads to its first. */
+export const SiteGroups = () => {
+  const { groups, group } = useSite();
   return (
     <nav aria-label="Desk">
-      <ul className="flex flex-wrap gap-x-[22px] gap-y-1">
-        {places
-          .filter((place) => isOffered(place, session))
-          .map(({ to, name }) => (
-            <li key={to}>
-              <NavLink
-                to={to}
-                end={to === '/'}
-                className={({ isActive }) =>
-                  cx(
-                    'inline-block rounded-sm border-b-4 py-1 text-[17px] font-bold',
-                    isActive
-                      ? 'border-ember font-extrabold text-ink'
-                      : 'border-transparent text-soft hover:text-ink',
-                  )
-                }
-              >
-                {name}
-              </NavLink>
-            </li>
-          ))}
+      <ul className="flex flex-wrap gap-1">
+        {groups.map((each) => (
+          <li key={each.name}>
+            <GroupLink group={each} isHere={each === group} />
+          </li>
+        ))}
+      </ul>
+    </nav>
+  );
+};
+
+/** A place as it hangs from the line: the one that is open with a drop of metal. */
+const PlaceLink = ({ to, name, isHere }: SitePlace & { readonly isHere: boolean }) => (
+  <Link
+    to={to}
+    aria-current={isHere ? 'page' : undefined}
+    className={cx(
+      'relative inline-flex min-h-10 items-center rounded-sm text-[16px]',
+      isHere ? 'font-extrabold text-ink' : 'font-bold text-soft hover:text-ink',
+    )}
+  >
+    {name}
+    {isHere ? (
+      <svg
+        viewBox="0 0 20 26"
+        className="absolute -bottom-[21px] left-1/2 h-[22px] w-[17px] -translate-x-1/2"
+        aria-hidden="true"
+      >
+        <path d="M10 0c4 7 8 10 8 16a8 8 0 0 1-16 0c0-6 4-9 8-16z" className="fill-ember-fill" />
+      </svg>
+    ) : null}
+  </Link>
+);
+
+/** The places of the group that is open, hanging from one line; nothing where the address is in none. */
+export const SitePlaces = () => {
+  const { group, place } = useSite();
+  if (!group) return null;
+  return (
+    <nav aria-label={group.name} className="border-b-[3px] border-ink">
+      <ul className="flex flex-wrap gap-x-7">
+        {group.places.map((each) => (
+          <li key={each.to}>
+            <PlaceLink {...each} isHere={each.to === place?.to} />
+          </li>
+        ))}
       </ul>
     </nav>
   );

@@ -2,14 +2,7 @@ import type { AlloyRevision } from '#shared/contracts/alloy.ts';
 import type { AlloyFamily } from '#shared/domain/alloy/alloy-family.ts';
 import type { QuenchRule } from '#shared/domain/alloy/quench-rule.ts';
 import { fromCelsius, type TemperatureUnit } from '#shared/lib/units.ts';
-import { writeWt } from './element-names.ts';
-
-/** One metal of the composition as it is typed. */
-export interface PartValues {
-  readonly symbol: string;
-  readonly wt: string;
-  readonly tolerance: string;
-}
+import { emptyPart, partsOfAssay, type PartValues } from './read-parts.ts';
 
 /** Everything the alloy form holds, as it is typed. */
 export interface AlloyFormValues {
@@ -37,9 +30,6 @@ export interface AlloyFormValues {
   readonly note: string;
 }
 
-/** A metal not yet named. */
-export const emptyPart: PartValues = { symbol: '', wt: '', tolerance: '' };
-
 /** The form of an alloy not yet known. */
 export const emptyAlloyForm: AlloyFormValues = {
   name: '',
@@ -66,11 +56,7 @@ export const formOfRevision = (
     ...emptyAlloyForm,
     name,
     family,
-    parts: Object.entries(compositionWt).map(([symbol, wt]) => ({
-      symbol,
-      wt: writeWt(wt),
-      tolerance: toleranceWt[symbol] === undefined ? '' : writeWt(toleranceWt[symbol]),
-    })),
+    parts: partsOfAssay({ compositionWt, toleranceWt }),
     fineness: String(revision.fineness),
     quench: {
       earliest: minutes(quench.earliestS),

@@ -1,23 +1,31 @@
 import { useId } from 'react';
 import { useFieldArray, useFormContext, useWatch } from 'react-hook-form';
 import { parseDecimal } from '#shared/lib/decimal.ts';
+import { exactWhole, isWhole, sumOfWt, type WholeRange } from '#shared/lib/whole-range.ts';
 import { Button } from '#src/ui/button.tsx';
 import { controlClass } from '#src/ui/control-class.ts';
 import { FieldError } from '#src/ui/field.tsx';
 import { elementNames, writeWt } from './element-names.ts';
-import { emptyPart, type AlloyFormValues } from './alloy-form-values.ts';
+import { emptyPart, type PartValues } from './read-parts.ts';
+
+/** A form that holds a composition. */
+interface WithParts {
+  readonly parts: PartValues[];
+}
 
 /** Sum of what can be read of the parts, wt%. */
 export const sumOfParts = (parts: readonly { readonly wt: string }[]): number =>
-  parts.reduce((sum, { wt }) => {
-    const number = parseDecimal(wt);
-    return number.ok ? sum + number.value : sum;
-  }, 0);
+  sumOfWt(
+    parts.flatMap(({ wt }) => {
+      const number = parseDecimal(wt);
+      return number.ok ? [number.value] : [];
+    }),
+  );
 
-/** What the running sum says: how much is missing, or too much. */
-export const sumSentence = (sum: number): string => {
+/** What the running sum says: how much is missing or too much, beyond what still counts as whole. */
+export const sumSentence = (sum: number, whole: WholeRange = exactWhole): string => {
+  if (isWhole(sum, whole)) return `Sum ${writeWt(sum)} wt%: complete.`;
   const off = 100 - sum;
-  if (Math.abs(off) <= 0.005) return 'Sum 100 wt%: complete.';
   return `Sum ${writeWt(sum)} wt%: ${writeWt(Math.abs(off))} ${off > 0 ? 'missing' : 'too much'}.`;
 };
 
@@ -30,7 +38,7 @@ const PartRow = ({
   readonly names: string;
   readonly onRemove: () => void;
 }) => {
-  const { register, formState } = useFormContext<AlloyFormValues>();
+  const { register, formState } = useFormContext<WithParts>();
   const id = useId();
   const errors = formState.errors.parts?.[index];
   const error = errors?.symbol?.message ?? errors?.wt?.message ?? errors?.tolerance?.message;
@@ -71,8 +79,8 @@ const PartRow = ({
 };
 
 /** The composition in wt%, a row for each metal, with its running sum. */
-export const CompositionFields = () => {
-  const { control, formState } = useFormContext<AlloyFormValues>();
+export const CompositionFields = ({ whole = exactWhole }: { readonly whole?: WholeRange }) => {
+  const { control, formState } = useFormContext<WithParts>();
   const { fields, append, remove } = useFieldArray({ control, name: 'parts' });
   const parts = useWatch({ control, name: 'parts' });
   const names = useId();
@@ -99,7 +107,7 @@ export const CompositionFields = () => {
         <PartRow key={field.id} index={index} names={names} onRemove={() => remove(index)} />
       ))}
       <div className="flex flex-wrap items-center justify-between gap-3">
-        <output className="font-extrabold">{sumSentence(sumOfParts(parts))}</output>
+        <output className="font-extrabold">{sumSentence(sumOfParts(parts), whole)}</output>
         <Button onClick={() => append(emptyPart)}>Add an element</Button>
       </div>
       <FieldError

@@ -1,13 +1,9 @@
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import { parseDecimal } from '#shared/lib/decimal.ts';
 import { toCelsius, type TemperatureUnit } from '#shared/lib/units.ts';
-import type { AlloyFormValues, PartValues } from './alloy-form-values.ts';
-
-/** What a form says as a request, unchecked, and what in it cannot be read, by the form's own paths. */
-export interface ReadForm {
-  readonly request: unknown;
-  readonly faults: readonly FieldProblem[];
-}
+import type { AlloyFormValues } from './alloy-form-values.ts';
+import type { ReadForm } from './form-schema.ts';
+import { placeOfPart, readParts, type PartValues } from './read-parts.ts';
 
 type Faults = FieldProblem[];
 
@@ -20,32 +16,6 @@ const readNumber = (text: string, path: string, faults: Faults): number | undefi
 
 const readOptional = (text: string, path: string, faults: Faults): number | null | undefined =>
   text.trim() === '' ? null : readNumber(text, path, faults);
-
-/** A symbol as it is meant: `ag` and ` AG ` are Ag. */
-export const tidySymbol = (text: string): string => {
-  const letters = text.trim();
-  return letters.charAt(0).toUpperCase() + letters.slice(1).toLowerCase();
-};
-
-const readParts = (parts: readonly PartValues[], faults: Faults) => {
-  const compositionWt: Record<string, number> = {};
-  const toleranceWt: Record<string, number> = {};
-  parts.forEach((part, index) => {
-    const symbol = tidySymbol(part.symbol);
-    const isEmpty = symbol === '' && part.wt.trim() === '' && part.tolerance.trim() === '';
-    if (isEmpty) return;
-    if (!/^[A-Z][a-z]?$/.test(symbol)) {
-      faults.push({ path: `parts.${index}.symbol`, message: 'Use an element symbol, such as Ag.' });
-    } else if (symbol in compositionWt) {
-      faults.push({ path: `parts.${index}.symbol`, message: `${symbol} already stands in another row.` });
-    }
-    const wt = readNumber(part.wt, `parts.${index}.wt`, faults);
-    const tolerance = readOptional(part.tolerance, `parts.${index}.tolerance`, faults);
-    if (wt !== undefined) compositionWt[symbol] = wt;
-    if (tolerance !== undefined && tolerance !== null) toleranceWt[symbol] = tolerance;
-  });
-  return { compositionWt, toleranceWt };
-};
 
 const seconds = (minutes: number | null | undefined): number | null | undefined =>
   typeof minutes === 'number' ? Math.round(minutes * 60) : minutes;
@@ -66,12 +36,14 @@ const readMeasured = ({ isMeasured, measured }: AlloyFormValues, unit: Temperatu
 
 /** Reads a form as typed: decimal commas, minutes and the studio's degrees; nothing is guessed. */
 export const readAlloyForm = (values: AlloyFormValues, unit: TemperatureUnit): ReadForm => {
-  const faults: Faults = [];
+  const { compositionWt, toleranceWt, faults: partFaults } = readParts(values.parts);
+  const faults: Faults = [...partFaults];
   const { quench } = values;
   const request = {
     name: values.name,
     family: values.family,
-    ...readParts(values.parts, faults),
+    compositionWt,
+    toleranceWt,
     fineness: readNumber(values.fineness, 'fineness', faults),
     quench: {
       earliestS: seconds(readNumber(quench.earliest, 'quench.earliest', faults)),
@@ -87,8 +59,6 @@ export const readAlloyForm = (values: AlloyFormValues, unit: TemperatureUnit): R
 };
 
 const renamed: Readonly<Record<string, string>> = {
-  compositionWt: 'parts',
-  toleranceWt: 'parts',
   measured: 'isMeasured',
   'quench.earliestS': 'quench.earliest',
   'quench.latestS': 'quench.latest',
@@ -97,13 +67,6 @@ const renamed: Readonly<Record<string, string>> = {
   'measured.densityGPerCm3': 'measured.density',
 };
 
-/** The form's place for a request's path: `compositionWt.Ag` is the amount in the row of silver, `parts` the composition as a whole. */
-export const formPathOf = (path: string, parts: readonly PartValues[]): string => {
-  const [head = '', symbol] = path.split('.');
-  const column = head === 'compositionWt' ? 'wt' : head === 'toleranceWt' ? 'tolerance' : null;
-  if (column && symbol) {
-    const row = parts.findIndex((part) => tidySymbol(part.symbol) === symbol);
-    return row < 0 ? 'parts' : `parts.${row}.${column}`;
-  }
-  return renamed[path] ?? path;
-};
+/** The alloy form's place for a request's path: `compositionWt.Ag` is the amount in the row of silver, `parts` the composition as a whole. */
+export const formPathOf = (path: string, parts: readonly PartValues[]): string =>
+  placeOfPart(path, parts) ?? renamed[path] ?? path;

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { createAlloyRequest } from '#shared/contracts/alloy.ts';
+import { wholeOfLot } from '#shared/domain/metal/judge-lot.ts';
 import { alloyFormSchema } from './alloy-form-schema.ts';
 import { emptyAlloyForm, type AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
 import { sumOfParts, sumSentence } from '#src/desk/parts/composition-fields.tsx';
@@ -121,5 +122,7 @@ describe('the running sum', () => {
     expect(sumSentence(sumOfParts([{ wt: '92,5' }, { wt: 'x' }]))).toBe('Sum 92.5 wt%: 7.5 missing.');
     expect(sumSentence(100.2)).toBe('Sum 100.2 wt%: 0.2 too much.');
     expect(sumSentence(100)).toBe('Sum 100 wt%: complete.');
+    expect(sumSentence(99.99)).toBe('Sum 99.99 wt%: 0.01 missing.');
+    expect(sumSentence(99.99, wholeOfLot('fine'))).toBe('Sum 99.99 wt%: complete.');
   });
 });

@@ -1,34 +1,15 @@
-import { z } from 'zod';
-import type { FieldProblem } from '#shared/contracts/problem.ts';
+import type { z } from 'zod';
 import type { TemperatureUnit } from '#shared/lib/units.ts';
 import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
+import { formSchema, type FormReading } from '#src/desk/parts/form-schema.ts';
 import { formPathOf, readAlloyForm } from '#src/desk/parts/read-alloy-form.ts';
 
-const sentence = ({ message, code }: { readonly message: string; readonly code: string }): string =>
-  code === 'invalid_value' ? 'Choose one.' : message;
-
-const isUnder = (path: string, place: string): boolean => path === place || place.startsWith(`${path}.`);
-
-/** Every fault of a form: what cannot be read, then what the contract refuses where nothing else is wrong already. */
-const faultsOf = (
-  values: AlloyFormValues,
-  faults: readonly FieldProblem[],
-  issues: readonly z.core.$ZodIssue[],
-): readonly FieldProblem[] => {
-  const refused = issues.map((issue) => ({
-    path: formPathOf(issue.path.join('.'), values.parts),
-    message: sentence(issue),
-  }));
-  return [...faults, ...refused.filter(({ path }) => !faults.some((fault) => isUnder(path, fault.path)))];
-};
+/** How the alloy's form is read in the studio's degrees. */
+export const alloyReading = (unit: TemperatureUnit): FormReading<AlloyFormValues> => ({
+  read: (values) => readAlloyForm(values, unit),
+  placeOf: (path, { parts }) => formPathOf(path, parts),
+});
 
 /** A form's schema: reads what was typed into a request and holds it against the contract, with faults at the form's fields. */
 export const alloyFormSchema = <Request>(contract: z.ZodType<Request>, unit: TemperatureUnit) =>
-  z.custom<AlloyFormValues>().transform((values, context): Request => {
-    const { request, faults } = readAlloyForm(values, unit);
-    const parsed = contract.safeParse(request);
-    for (const { path, message } of faultsOf(values, faults, parsed.error?.issues ?? [])) {
-      context.addIssue({ code: 'custom', path: path.split('.'), message });
-    }
-    return parsed.success && faults.length === 0 ? parsed.data : z.NEVER;
-  });
+  formSchema(contract, alloyReading(unit));

@@ -2,16 +2,16 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { useMemo, type ReactNode } from 'react';
 import { FormProvider, useForm, useFormContext } from 'react-hook-form';
 import type { z } from 'zod';
-import { ProblemError } from '#src/lib/http.ts';
 import { Button } from '#src/ui/button.tsx';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
 import { applyProblem } from '#src/desk/parts/apply-problem.ts';
 import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
-import { alloyFormSchema } from './alloy-form-schema.ts';
-import type { AlloyFormValues, PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
 import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
+import { atFormPlaces, rootOfParts } from '#src/desk/parts/form-schema.ts';
+import { alloyFormSchema } from './alloy-form-schema.ts';
 import { LiveFigures } from './live-figures.tsx';
 import { MeasuredFields } from './measured-fields.tsx';
 import { QuenchFields } from './quench-fields.tsx';
@@ -29,16 +29,6 @@ export interface AlloyFormProps<Request> {
   /** The way out without sending. */
   readonly cancel: ReactNode;
 }
-
-/** A server's answer with its paths turned into the form's own. */
-const atFormFields = (error: unknown, parts: readonly PartValues[]): unknown => {
-  if (!(error instanceof ProblemError) || !error.problem.fields) return error;
-  const fields = error.problem.fields.map(({ path, message }) => {
-    const place = formPathOf(path, parts);
-    return { path: place === 'parts' ? 'parts.root' : place, message };
-  });
-  return new ProblemError({ ...error.problem, fields });
-};
 
 const places = ['name', 'family', 'parts', 'fineness', 'quench', 'isMeasured', 'measured', 'note'] as const;
 
@@ -84,7 +74,8 @@ export const AlloyForm = <Request,>(props: AlloyFormProps<Request>) => {
     try {
       await send(request);
     } catch (error) {
-      applyProblem<AlloyFormValues>(atFormFields(error, form.getValues('parts')), places, form.setError);
+      const placed = atFormPlaces(error, (path) => rootOfParts(formPathOf(path, form.getValues('parts'))));
+      applyProblem<AlloyFormValues>(placed, places, form.setError);
     }
   });
   return (

@@ -7,10 +7,10 @@ import { parseDecimal } from '#shared/lib/decimal.ts';
 import type { Result } from '#shared/lib/result.ts';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
 import type { StudioWriting } from '#src/desk/parts/use-studio.ts';
-import type { AlloyFormValues, PartValues } from '#src/desk/parts/alloy-form-values.ts';
+import type { AlloyFormValues } from '#src/desk/parts/alloy-form-values.ts';
 import { sumOfParts } from '#src/desk/parts/composition-fields.tsx';
 import { elementName, writeWt } from '#src/desk/parts/element-names.ts';
-import { tidySymbol } from '#src/desk/parts/read-alloy-form.ts';
+import { tidySymbol, type PartValues } from '#src/desk/parts/read-parts.ts';
 
 const readable = (parts: readonly PartValues[]): Readonly<Record<string, number>> =>
   Object.fromEntries(

@@ -10,7 +10,13 @@ import { NewAlloyForm } from './new-alloy-form.tsx';
 
 const session = {
   person: { id: 'p', name: 'Maren', roles: ['owner'] },
-  studio: { name: 'Studio', units: { temperature: 'C', mass: 'g' }, idleLockS: 300, timeZone: 'UTC' },
+  studio: {
+    name: 'Studio',
+    units: { temperature: 'C', mass: 'g' },
+    idleLockS: 300,
+    timeZone: 'UTC',
+    marksPlace: 'ISO 9202',
+  },
 } as unknown as DeskSession;
 
 const open = () => {

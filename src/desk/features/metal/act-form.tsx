@@ -6,7 +6,7 @@ import { Button } from '#src/ui/button.tsx';
 import { Dialog } from '#src/ui/dialog.tsx';
 import { applyProblem } from '#src/desk/parts/apply-problem.ts';
 import { FormProblem } from '#src/desk/parts/form-problem.tsx';
-import { atFormPlaces, formSchema, type FormReading } from './form-schema.ts';
+import { atFormPlaces, formSchema, type FormReading } from '#src/desk/parts/form-schema.ts';
 
 /** Props of {@link ActForm}. */
 export interface ActFormProps<Values extends FieldValues, Request> {

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { correctMovementRequest } from '#shared/contracts/ledger.ts';
 import { amendLotRequest, countLotRequest } from '#shared/contracts/lot.ts';
 import { assayReading, emptyMass, massReading } from './act-readings.ts';
-import { formSchema } from './form-schema.ts';
+import { formSchema } from '#src/desk/parts/form-schema.ts';
 
 const key = '0b0f3c1e-6a52-4f0c-9d3a-0c6a4d0e7f11';
 const count = formSchema(

@@ -1,10 +1,8 @@
 import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { MassUnit } from '#shared/lib/units.ts';
-import type { PartValues } from '#src/desk/parts/alloy-form-values.ts';
-import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
-import type { FormReading } from './form-schema.ts';
+import { rootOfParts, type FormReading } from '#src/desk/parts/form-schema.ts';
 import { readMass } from './metal-mass.ts';
-import { readParts } from './read-parts.ts';
+import { placeOfPart, readParts, type PartValues } from '#src/desk/parts/read-parts.ts';
 
 /** What a second person types to sign. */
 export interface SignValues {
@@ -63,10 +61,7 @@ export interface AssayValues {
 
 /** How a new assay is read. */
 export const assayReading: FormReading<AssayValues> = {
-  placeOf: (path, { parts }) => {
-    const place = formPathOf(path, parts);
-    return place === 'parts' ? 'parts.root' : place;
-  },
+  placeOf: (path, { parts }) => rootOfParts(placeOfPart(path, parts) ?? path),
   read: ({ parts, reason }) => {
     const { compositionWt, toleranceWt, faults } = readParts(parts);
     const read: readonly FieldProblem[] = faults;

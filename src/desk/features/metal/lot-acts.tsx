@@ -6,6 +6,7 @@ import {
   releaseLotRequest,
   type LotDetail,
 } from '#shared/contracts/lot.ts';
+import { wholeOfLot } from '#shared/domain/metal/judge-lot.ts';
 import { useAmendLot, useCountLot, useDispatchLot, useReleaseLot } from '#src/api/lots.ts';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
@@ -20,7 +21,7 @@ import {
   type MassValues,
 } from './act-readings.ts';
 import { writeExactGrams } from './metal-mass.ts';
-import { partsOfAssay } from './read-parts.ts';
+import { partsOfAssay } from '#src/desk/parts/read-parts.ts';
 import { useActKey } from './use-act-key.ts';
 
 interface ActProps {
@@ -69,7 +70,7 @@ const AssayAct = ({ lot, onClose }: ActProps) => {
       send={amend.mutateAsync}
       onClose={onClose}
     >
-      <CompositionFields />
+      <CompositionFields whole={wholeOfLot(lot.kind)} />
       <ReasonField name="reason" label="Whose assay it is" hint="The laboratory and its number." />
     </ActForm>
   );

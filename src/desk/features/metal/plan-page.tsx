@@ -20,7 +20,7 @@ import { Panel } from '#src/desk/parts/panel.tsx';
 import { CastingChoice } from './casting-choice.tsx';
 import { KeptPlan, PlannedCharge, ShortCharge } from './charge-view.tsx';
 import { castingsToPlan } from './charge-words.ts';
-import { atFormPlaces, formSchema } from './form-schema.ts';
+import { atFormPlaces, formSchema } from '#src/desk/parts/form-schema.ts';
 import { planReading, type PlanValues } from './plan-values.ts';
 
 type Request = z.output<typeof planChargeRequest>;

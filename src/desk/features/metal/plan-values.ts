@@ -1,5 +1,5 @@
 import { parseDecimal } from '#shared/lib/decimal.ts';
-import type { FormReading } from './form-schema.ts';
+import type { FormReading } from '#src/desk/parts/form-schema.ts';
 
 /** What is typed to plan a charge. */
 export interface PlanValues {

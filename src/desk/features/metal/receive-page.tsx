@@ -5,6 +5,7 @@ import { FormProvider, useForm, useFormContext, useWatch, type Path } from 'reac
 import { Link, useNavigate } from 'react-router-dom';
 import type { z } from 'zod';
 import { receiveLotRequest } from '#shared/contracts/lot.ts';
+import { wholeOfLot } from '#shared/domain/metal/judge-lot.ts';
 import { lotKindNames, lotKinds } from '#shared/domain/metal/lot.ts';
 import { alloysQuery } from '#src/api/alloys.ts';
 import { useReceiveLot } from '#src/api/lots.ts';
@@ -23,7 +24,7 @@ import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { approvedRevision } from '#src/desk/parts/choose-revision.ts';
 import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
 import { capitalised } from '#src/desk/parts/element-names.ts';
-import { atFormPlaces, formSchema } from './form-schema.ts';
+import { atFormPlaces, formSchema, rootOfParts } from '#src/desk/parts/form-schema.ts';
 import { useActKey } from './use-act-key.ts';
 import { emptyReceive, receiveReading, type ReceiveValues } from './receive-values.ts';
 
@@ -79,7 +80,7 @@ const WhatItIs = () => {
         />
       </div>
       <div className="grid gap-2">
-        <CompositionFields />
+        <CompositionFields whole={wholeOfLot(kind)} />
         <p className="text-[15px] text-soft">
           {kind === 'fine'
             ? 'Fine metal is certified by its purity alone: gold 99.99 is complete as it stands, without the rest.'
@@ -160,10 +161,7 @@ export const ReceivePage = () => {
       await navigate(`/metal/lots/${lot.id}`);
     } catch (error) {
       if (isProblemError(error, 'entry-questioned')) setQuestioned(true);
-      const atPlaces = atFormPlaces(error, (path) => {
-        const place = reading.placeOf(path, form.getValues());
-        return place === 'parts' ? 'parts.root' : place;
-      });
+      const atPlaces = atFormPlaces(error, (path) => rootOfParts(reading.placeOf(path, form.getValues())));
       applyProblem<ReceiveValues>(atPlaces, fields, form.setError);
     }
   });

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { receiveLotRequest } from '#shared/contracts/lot.ts';
 import { studioClock } from '#src/desk/parts/studio-clock.ts';
-import { formSchema } from './form-schema.ts';
+import { formSchema } from '#src/desk/parts/form-schema.ts';
 import { emptyReceive, receiveReading } from './receive-values.ts';
 
 const now = Date.parse('2026-12-01T09:30:00Z');

@@ -2,11 +2,9 @@ import type { FieldProblem } from '#shared/contracts/problem.ts';
 import type { LotKind } from '#shared/domain/metal/lot.ts';
 import type { MassUnit } from '#shared/lib/units.ts';
 import type { StudioClock } from '#src/desk/parts/studio-clock.ts';
-import { emptyPart, type PartValues } from '#src/desk/parts/alloy-form-values.ts';
-import { formPathOf } from '#src/desk/parts/read-alloy-form.ts';
-import type { FormReading } from './form-schema.ts';
+import type { FormReading } from '#src/desk/parts/form-schema.ts';
 import { readMass } from './metal-mass.ts';
-import { readParts } from './read-parts.ts';
+import { emptyPart, placeOfPart, readParts, type PartValues } from '#src/desk/parts/read-parts.ts';
 
 /** The form of a lot that is taken in, as it is typed. */
 export interface ReceiveValues {
@@ -58,7 +56,7 @@ const momentOf = (day: string, { clock, nowMs }: ReceiveContext): string | null 
 /** The form's place for a path of the request. */
 const placeOf = (path: string, { parts }: Pick<ReceiveValues, 'parts'>): string => {
   if (path === 'massG') return 'mass';
-  return path === 'receivedAt' ? 'receivedOn' : formPathOf(path, parts);
+  return path === 'receivedAt' ? 'receivedOn' : (placeOfPart(path, parts) ?? path);
 };
 
 /** How the form of a lot is read: decimal commas, the studio's unit, a local day. */

@@ -14,6 +14,10 @@ export interface FormReading<Values> {
   readonly placeOf: (path: string, values: Values) => string;
 }
 
+/** A choice that was not made is asked for; every other refusal is in the contract's own words. */
+const sentenceOfIssue = ({ code, message }: z.core.$ZodIssue): string =>
+  code === 'invalid_value' && /^Invalid/.test(message) ? 'Choose one.' : message;
+
 const isUnder = (path: string, place: string): boolean => path === place || place.startsWith(`${path}.`);
 
 /** A form's schema: reads what was typed and holds it against the contract, with every fault at the form's own field. */
@@ -25,7 +29,7 @@ export const formSchema = <Values, Request>(
     const { request, faults } = read(values);
     const parsed = contract.safeParse(request);
     const refused = (parsed.error?.issues ?? [])
-      .map(({ path, message }) => ({ path: placeOf(path.join('.'), values), message }))
+      .map((issue) => ({ path: placeOf(issue.path.join('.'), values), message: sentenceOfIssue(issue) }))
       .filter(({ path }) => !faults.some((fault) => isUnder(path, fault.path)));
     for (const { path, message } of [...faults, ...refused]) {
       context.addIssue({ code: 'custom', path: path.split('.'), message });
@@ -39,3 +43,6 @@ export const atFormPlaces = (error: unknown, placeOf: (path: string) => string):
   const fields = error.problem.fields.map(({ path, message }) => ({ path: placeOf(path), message }));
   return new ProblemError({ ...error.problem, fields });
 };
+
+/** Where a list of parts keeps a fault of the list as a whole. */
+export const rootOfParts = (place: string): string => (place === 'parts' ? 'parts.root' : place);
