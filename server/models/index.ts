@@ -4,8 +4,11 @@ import { AlloyRevision } from './alloy-revision.ts';
 import { Casting } from './casting.ts';
 import { CastingMove } from './casting-move.ts';
 import { ChargePlan } from './charge-plan.ts';
+import { CoolingCurve } from './cooling-curve.ts';
 import { Crucible } from './crucible.ts';
 import { Flask } from './flask.ts';
+import { InstrumentReading } from './instrument-reading.ts';
+import { Instrument } from './instrument.ts';
 import { Lot } from './lot.ts';
 import { LotAmendment } from './lot-amendment.ts';
 import { LotDocument } from './lot-document.ts';
@@ -13,6 +16,7 @@ import { MeltAmendment } from './melt-amendment.ts';
 import { MeltEvent } from './melt-event.ts';
 import { Melt } from './melt.ts';
 import { MetalMovement } from './metal-movement.ts';
+import { PyrometerCheck } from './pyrometer-check.ts';
 import { Reading } from './reading.ts';
 import { StockCount } from './stock-count.ts';
 import { StudioSettings } from './studio-settings.ts';
@@ -40,6 +44,14 @@ const associateMetal = (): void => {
   StockCount.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   StockCount.belongsTo(Lot, { as: 'lot', foreignKey: 'lotId' });
   ChargePlan.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+};
+
+const associateInstruments = (): void => {
+  Instrument.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
+  PyrometerCheck.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  InstrumentReading.belongsTo(Flask, { as: 'flask', foreignKey: 'flaskId' });
+  CoolingCurve.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  CoolingCurve.belongsTo(Instrument, { as: 'instrument', foreignKey: 'instrumentId' });
 };
 
 const associate = (): void => {
@@ -79,8 +91,11 @@ const classes = {
   Casting,
   CastingMove,
   ChargePlan,
+  CoolingCurve,
   Crucible,
   Flask,
+  Instrument,
+  InstrumentReading,
   Lot,
   LotAmendment,
   LotDocument,
@@ -88,6 +103,7 @@ const classes = {
   MeltAmendment,
   MeltEvent,
   MetalMovement,
+  PyrometerCheck,
   Reading,
   StockCount,
   StudioSettings,
@@ -106,5 +122,6 @@ export const initModels = (sequelize: Sequelize): Models => {
   for (const model of Object.values(classes)) model.define(sequelize);
   associate();
   associateMetal();
+  associateInstruments();
   return classes;
 };

@@ -1,4 +1,6 @@
 import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
+import { chooseCooling } from '#shared/domain/instrument/choose-cooling.ts';
+import type { CoolingFit } from '#shared/domain/instrument/fit-flask-cooling.ts';
 import { computeCardFigures } from '#shared/domain/pour-card/card-figures.ts';
 import type { CardContext, ChargeAlloy } from '#shared/domain/pour-card/card-state.ts';
 import type { StudioSettings } from '../models/studio-settings.ts';
@@ -17,8 +19,15 @@ export const chargeAlloyOf = ({
   markPpt: fineness,
 });
 
-/** What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables. */
-export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): CardContext => {
+/**
+ * What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables, and
+ * how flasks of its size were seen to cool.
+ */
+export const cardContextOf = (
+  casting: LoadedCasting,
+  studio: StudioSettings,
+  coolingFit: CoolingFit | null,
+): CardContext => {
   const { alloyRevision, tree, flask, method } = casting;
   return {
     figures: computeCardFigures({
@@ -31,6 +40,7 @@ export const cardContextOf = (casting: LoadedCasting, studio: StudioSettings): C
       waxMassG: tree.waxMassG,
       flaskDiameterMm: flask.diameterMm,
       tables: studio.processTables,
+      cooling: chooseCooling(flask.diameterMm, studio.processTables.flaskCooling, coolingFit),
     }),
     limits: studio.limits,
     plannedMetalG: casting.plannedMetalG,

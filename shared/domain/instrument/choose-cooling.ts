@@ -26,7 +26,7 @@ export const chooseCooling = (
       perSecond: fit.perSecond,
       from: 'fitted',
       readings: fit.readings,
-      words: `Fitted to ${fit.readings} readings of ${fit.outings} flasks of this size: ${perMinute(fit.perSecond)} ± ${perMinute(fit.standardError)} per minute (standard error).`,
+      words: `Fitted to ${fit.readings} readings of ${fit.outings} flasks of this size: ${perMinute(fit.perSecond)} ± ${perMinute(fit.standardError ?? 0)} per minute (standard error).`,
     };
   const { perSecond, diameterMm: nearestMm } = coolingRateFor(diameterMm, table);
   return {

@@ -59,7 +59,9 @@ describe('the fitted cooling constant', () => {
     const fits = Array.from({ length: 300 }, (_, seed) =>
       fitOf(synthetic({ perSecond, outings: 4, noiseC: 2, seed })),
     );
-    const inside = fits.filter((fit) => Math.abs(fit.perSecond - perSecond) < 2 * fit.standardError).length;
+    const inside = fits.filter(
+      (fit) => Math.abs(fit.perSecond - perSecond) < 2 * (fit.standardError ?? 0),
+    ).length;
     expect(inside / fits.length).toBeGreaterThan(0.9);
     const mean = fits.reduce((total, fit) => total + fit.perSecond, 0) / fits.length;
     expect(Math.abs(mean / perSecond - 1)).toBeLessThan(0.005);
@@ -92,7 +94,7 @@ describe('the fitted cooling constant', () => {
         id: String(k),
       })),
     );
-    expect(fitOf(unlike).standardError).toBeGreaterThan(5 * alike.standardError);
+    expect(fitOf(unlike).standardError).toBeGreaterThan(5 * (alike.standardError ?? 0));
   });
 
   it('leaves out a lone reading and a cold one, with the reason', () => {

@@ -22,8 +22,8 @@ export interface LeftOutReading extends FlaskReading {
 /** A cooling constant fitted to logged temperatures, and what stands behind it. */
 export interface CoolingFit {
   readonly perSecond: number;
-  /** Standard error of the constant, per second; infinite where it cannot be told. */
-  readonly standardError: number;
+  /** Standard error of the constant, per second; null where too few readings tell it. */
+  readonly standardError: number | null;
   /** Readings and outings that were used. */
   readonly readings: number;
   readonly outings: number;
@@ -125,9 +125,9 @@ const worstOutlier = (points: readonly Point[], line: Line): Point | null => {
  * The larger of two standard errors: from the scatter of readings about their lines, and from how the outings' own slopes
  * differ, for the readings of one outing share whatever was odd about it.
  */
-const standardErrorOf = (points: readonly Point[], line: Line): number => {
+const standardErrorOf = (points: readonly Point[], line: Line): number | null => {
   const freedom = points.length - line.logStarts.size - 1;
-  if (freedom < 1) return Number.POSITIVE_INFINITY;
+  if (freedom < 1) return null;
   const within = Math.sqrt(sum(points.map((point) => offBy(line, point) ** 2)) / freedom / line.spread);
   const { ownSlopes } = line;
   if (ownSlopes.length < 2) return within;
@@ -206,7 +206,8 @@ export const faultOfFit = (fit: CoolingFit | null): string | null => {
     return `A fit wants ${leastReadings} readings from ${leastOutings} flasks out of the furnace; there are ${fit?.readings ?? 0} from ${fit?.outings ?? 0}.`;
   if (fit.perSecond < plausible.low || fit.perSecond > plausible.high)
     return 'The readings tell of no cooling that a flask could have. Look at what was logged.';
-  if (fit.standardError > largestRelativeError * fit.perSecond)
-    return `The readings scatter too much: the constant is known to ${Math.round((100 * fit.standardError) / fit.perSecond)} % only, and ${100 * largestRelativeError} % is wanted.`;
+  const relative = (fit.standardError ?? Number.POSITIVE_INFINITY) / fit.perSecond;
+  if (relative > largestRelativeError)
+    return `The readings scatter too much: the constant is known to ${Math.round(100 * relative)} % only, and ${100 * largestRelativeError} % is wanted.`;
   return null;
 };
