@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
-import type { Card } from '#shared/contracts/card.ts';
+import type { PourCard } from '#shared/contracts/card.ts';
 import type { MeltCurves } from '#shared/contracts/cooling-curve.ts';
 import type { FlaskSizeCooling } from '#shared/contracts/flask-cooling.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
@@ -41,8 +41,8 @@ const sizeOf = async (diameterMm: number): Promise<FlaskSizeCooling> => {
   return size;
 };
 
-const cardOf = async (castingId: string): Promise<Card> =>
-  (await caster.get(`/api/cards/${castingId}`).expect(200)).body as Card;
+const cardOf = async (castingId: string): Promise<PourCard> =>
+  (await caster.get(`/api/cards/${castingId}`).expect(200)).body as PourCard;
 
 describe('how flasks cool', () => {
   it('is the table’s until enough was logged, then fitted, and the card says which', async () => {

@@ -20,6 +20,7 @@ const places: readonly Place[] = [
   { to: '/flasks', name: 'Flasks' },
   { to: '/people', name: 'People', needs: 'managePeople' },
   { to: '/terminals', name: 'Terminals', needs: 'manageTerminals' },
+  { to: '/instruments', name: 'Instruments', needs: 'manageTerminals' },
   { to: '/studio', name: 'Studio', needs: 'editStudio' },
 ];
 

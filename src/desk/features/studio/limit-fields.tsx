@@ -32,5 +32,12 @@ export const LimitFields = (part: FormPart) => (
       hint="So far above the pour window."
       {...part}
     />
+    <NumberField
+      path="pyrometerCheckDays"
+      label="Instruments are checked every"
+      unit="days"
+      hint="At a freezing point; later it is overdue."
+      {...part}
+    />
   </div>
 );
