@@ -18,8 +18,7 @@ const Overdue = ({ instruments }: { readonly instruments: readonly Instrument[] 
   return (
     <div className="mb-6">
       <Notice kind="caution" title={`Check overdue: ${names}.`}>
-        Until it is checked again, a cooling curve it logs is judged by the class of its thermocouple, not by
-        its last check.
+        Until it is checked again, a cooling curve it logs is judged as if it had never been checked.
       </Notice>
     </div>
   );

@@ -21,6 +21,15 @@ const pathOf = (points: readonly CurvePoint[], x: Scale, y: Scale): string =>
     )
     .join('');
 
+/** The curve from where it was last heated past the lowest it cooled to: the heating says nothing of the alloy. */
+const fromHolding = (points: readonly CurvePoint[]): readonly CurvePoint[] => {
+  const highest = Math.max(...points.map(({ temperatureC }) => temperatureC));
+  const top = points.findIndex(({ temperatureC }) => temperatureC === highest);
+  const low = Math.min(...points.slice(top).map(({ temperatureC }) => temperatureC));
+  const heated = points.findLastIndex(({ temperatureC }, k) => k < top && temperatureC < low);
+  return points.slice(heated + 1);
+};
+
 interface Named {
   readonly text: string;
   readonly celsius: number;
@@ -65,13 +74,17 @@ export const CoolingCurvePlot = ({ melt, curve }: { readonly melt: Melt; readonl
   const box = useRef<HTMLDivElement>(null);
   const width = Math.max(360, useWidth(box, 720));
   const { degrees, temperature, units } = useStudio();
-  const { points, verdict } = curve;
+  const { verdict } = curve;
+  const points = useMemo(() => fromHolding(curve.points), [curve.points]);
   const computed = useMemo(() => computedCurve(curve, melt.compositionWt), [curve, melt.compositionWt]);
   const temperatures = points.map(({ temperatureC }) => temperatureC);
   const [low, high] = [Math.min(...temperatures), Math.max(...temperatures)];
-  const last = Math.max(...points.map(({ seconds }) => seconds)) / 60;
+  const [begin, last] = [points[0]?.seconds ?? 0, points.at(-1)?.seconds ?? 0].map((each) => each / 60) as [
+    number,
+    number,
+  ];
   const frame = { left: 52, right: width - 190, top: 16, bottom: height - 60 };
-  const x = scaleLinear([0, last], [frame.left, frame.right]);
+  const x = scaleLinear([begin, last], [frame.left, frame.right]);
   const y = scaleLinear([low - 10, high + 10], [frame.bottom, frame.top]);
   const ticks = scaleLinear(
     [low, high].map((celsius) => fromCelsius(celsius, units.temperature)),
@@ -98,7 +111,7 @@ export const CoolingCurvePlot = ({ melt, curve }: { readonly melt: Melt; readonl
         className="w-full"
         fill="none"
         role="img"
-        aria-label={`Logged from ${temperature(high)} down to ${temperature(low)} over ${last.toFixed(0)} minutes${range ? `, over the computed curve with its liquidus at ${temperature(range.liquidusC)}` : ''}. ${verdict.sentence}`}
+        aria-label={`Logged from ${temperature(high)} down to ${temperature(low)} over ${(last - begin).toFixed(0)} minutes${range ? `, over the computed curve with its liquidus at ${temperature(range.liquidusC)}` : ''}. ${verdict.sentence}`}
       >
         <g className="fill-soft text-[15px] font-extrabold">
           {ticks.map((celsius) => (
@@ -131,7 +144,7 @@ export const CoolingCurvePlot = ({ melt, curve }: { readonly melt: Melt; readonl
         ) : null}
         <path
           d={pathOf(
-            computed.filter(({ seconds }) => seconds >= 0 && seconds <= last * 60),
+            computed.filter(({ seconds }) => seconds >= begin * 60 && seconds <= last * 60),
             x,
             y,
           )}
