@@ -3,7 +3,7 @@ import express, { type Express, type RequestHandler } from 'express';
 import type { Sequelize } from 'sequelize';
 import type { Environment } from './environment.ts';
 import { answerErrors, unknownRoute } from './middlewares/answer-errors.ts';
-import { limitSignIns } from './middlewares/limit-rate.ts';
+import { limitReadings, limitSignIns } from './middlewares/limit-rate.ts';
 import { explainBodyErrors, parseBody } from './middlewares/parse-body.ts';
 import { refuseForeign } from './middlewares/place.ts';
 import { secureHeaders } from './middlewares/secure-headers.ts';
@@ -71,6 +71,7 @@ export const createApp = (deps: AppDeps): App => {
   );
   app.use('/api', identify(services, passport));
   app.use(['/api/session/desk', '/api/session/terminal', '/api/terminals'], limitSignIns());
+  app.use('/api/instrument-readings', limitReadings());
   app.use('/api', parseBody, explainBodyErrors);
   for (const route of routes) if (!healthRoutes.includes(route)) mountRoute(app, services, route);
   app.use('/api', unknownRoute);

@@ -11,6 +11,7 @@ import { meltPolicy } from '../policies/melt.ts';
 import { can } from '../policies/policy.ts';
 import { cardContextOf } from '../queries/card-context.ts';
 import { loadCasting, type LoadedCasting } from '../queries/load-casting.ts';
+import { loadCoolingFit } from '../queries/load-flask-cooling.ts';
 import { loadInstruction } from '../queries/load-instruction.ts';
 import { loadStudio } from '../queries/load-studio.ts';
 import { refuseUnapprovedAlloy } from '../queries/refuse-unapproved-alloy.ts';
@@ -77,6 +78,7 @@ const begin = async (
   const worker = await workerFor(services, actor, casting.alloyRevisionId);
   const studio = await loadStudio(services);
   const instruction = await loadInstruction(services);
+  const coolingFit = await loadCoolingFit(services, casting.flask.diameterMm);
   const number = await nextMeltNumber(services);
   const melt = await services.models.Melt.create({
     number,
@@ -84,7 +86,7 @@ const begin = async (
     castingId: casting.id,
     alloyRevisionId: casting.alloyRevisionId,
     workInstructionRevisionId: instruction.id,
-    context: cardContextOf(casting, studio, instruction),
+    context: cardContextOf(casting, studio, { instruction, coolingFit }),
     state: freshCard,
     openedBy: actor.person.id,
     terminalId: actor.terminal.id,

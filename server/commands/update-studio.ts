@@ -7,7 +7,7 @@ import type { Services } from '../services/services.ts';
 /** Stores the studio's settings, unless someone else stored others since they were read. */
 export const updateStudio = (
   services: Services,
-  { version, marksPlace, ...settings }: UpdateStudioRequest,
+  { version, marksPlace, pyrometerCheckDays, ...settings }: UpdateStudioRequest,
 ): Promise<StudioSettings> =>
   services.sequelize.transaction(async () => {
     const studio = await loadStudio(services, { lock: true });
@@ -20,6 +20,7 @@ export const updateStudio = (
     return studio.update({
       ...settings,
       marksPlace: marksPlace ?? studio.marksPlace,
+      pyrometerCheckDays: pyrometerCheckDays ?? studio.pyrometerCheckDays,
       version: version + 1,
     });
   });

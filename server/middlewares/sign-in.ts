@@ -4,10 +4,12 @@ import { Strategy } from 'passport-local';
 import { signInWithPassword } from '../commands/sign-in-with-password.ts';
 import { signInWithPin } from '../commands/sign-in-with-pin.ts';
 import { AppError } from '../errors.ts';
+import type { Instrument } from '../models/instrument.ts';
 import type { Terminal } from '../models/terminal.ts';
 import type { User as StudioUser } from '../models/user.ts';
 import type { Actor } from '../policies/actor.ts';
 import type { Services } from '../services/services.ts';
+import { bearerOf } from './bearer-token.ts';
 import type { Http } from './http.ts';
 import { placeOf, type Place } from './place.ts';
 import { terminalOf } from './terminal-token.ts';
@@ -25,6 +27,7 @@ declare global {
     interface Locals {
       actor: Actor;
       terminal: Terminal | null;
+      instrument: Instrument | null;
       passport: PassportInstance;
     }
   }
@@ -63,12 +66,13 @@ const isSessionHere = ({ session }: Request, place: Place, terminal: Terminal | 
 
 /** Who is asking, with what they hold here. */
 const readActor = ({ request, response }: Http): Actor => {
-  const { terminal } = response.locals;
+  const { terminal, instrument } = response.locals;
   const place = placeOf(request);
   const person = request.user && isSessionHere(request, place, terminal) ? request.user : null;
   return {
     person,
     terminal: terminal && { id: terminal.id, name: terminal.name, bay: terminal.bay },
+    instrument: instrument && { id: instrument.id, name: instrument.name },
     via: person ? place : null,
   };
 };
@@ -77,7 +81,9 @@ const readActor = ({ request, response }: Http): Actor => {
 export const identify =
   (services: Services, passport: PassportInstance): RequestHandler =>
   async (request, response, next) => {
-    response.locals.terminal = await terminalOf(request, services);
+    const bearer = await bearerOf(request, services);
+    response.locals.instrument = bearer.instrument;
+    response.locals.terminal = bearer.terminal ?? (await terminalOf(request, services));
     response.locals.passport = passport;
     response.locals.actor = readActor({ request, response });
     next();

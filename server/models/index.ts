@@ -5,8 +5,11 @@ import { Casting } from './casting.ts';
 import { CastingMove } from './casting-move.ts';
 import { ChargePlan } from './charge-plan.ts';
 import { Countersign } from './countersign.ts';
+import { CoolingCurve } from './cooling-curve.ts';
 import { Crucible } from './crucible.ts';
 import { Flask } from './flask.ts';
+import { InstrumentReading } from './instrument-reading.ts';
+import { Instrument } from './instrument.ts';
 import { Lot } from './lot.ts';
 import { LotAmendment } from './lot-amendment.ts';
 import { LotDocument } from './lot-document.ts';
@@ -15,6 +18,7 @@ import { MeltEvent } from './melt-event.ts';
 import { Melt } from './melt.ts';
 import { MetalMovement } from './metal-movement.ts';
 import { Photograph } from './photograph.ts';
+import { PyrometerCheck } from './pyrometer-check.ts';
 import { Reading } from './reading.ts';
 import { StockCount } from './stock-count.ts';
 import { StudioSettings } from './studio-settings.ts';
@@ -42,6 +46,14 @@ const associateMetal = (): void => {
   StockCount.belongsTo(User, { as: 'user', foreignKey: 'userId' });
   StockCount.belongsTo(Lot, { as: 'lot', foreignKey: 'lotId' });
   ChargePlan.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+};
+
+const associateInstruments = (): void => {
+  Instrument.belongsTo(Terminal, { as: 'terminal', foreignKey: 'terminalId' });
+  PyrometerCheck.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  InstrumentReading.belongsTo(Flask, { as: 'flask', foreignKey: 'flaskId' });
+  CoolingCurve.belongsTo(User, { as: 'user', foreignKey: 'userId' });
+  CoolingCurve.belongsTo(Instrument, { as: 'instrument', foreignKey: 'instrumentId' });
 };
 
 const associate = (): void => {
@@ -85,8 +97,11 @@ const classes = {
   CastingMove,
   ChargePlan,
   Countersign,
+  CoolingCurve,
   Crucible,
   Flask,
+  Instrument,
+  InstrumentReading,
   Lot,
   LotAmendment,
   LotDocument,
@@ -95,6 +110,7 @@ const classes = {
   MeltEvent,
   MetalMovement,
   Photograph,
+  PyrometerCheck,
   Reading,
   StockCount,
   StudioSettings,
@@ -113,5 +129,6 @@ export const initModels = (sequelize: Sequelize): Models => {
   for (const model of Object.values(classes)) model.define(sequelize);
   associate();
   associateMetal();
+  associateInstruments();
   return classes;
 };

@@ -26,6 +26,8 @@ export class StudioSettings extends Model<
   declare processTables: ProcessTables;
   declare limits: StudioLimits;
   declare marksPlace: CreationOptional<MarkPlace>;
+  /** Days after which an instrument is to be checked again. */
+  declare pyrometerCheckDays: CreationOptional<number>;
 
   static define(sequelize: Sequelize): typeof StudioSettings {
     return StudioSettings.init(
@@ -39,6 +41,7 @@ export class StudioSettings extends Model<
         idleLockS: { type: DataTypes.INTEGER, allowNull: false },
         processTables: { type: DataTypes.JSONB, allowNull: false },
         limits: { type: DataTypes.JSONB, allowNull: false },
+        pyrometerCheckDays: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 30 },
         marksPlace: { type: DataTypes.TEXT, allowNull: false, defaultValue: 'ISO 9202' },
       },
       { sequelize, tableName: 'studio_settings' },

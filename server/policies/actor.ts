@@ -4,6 +4,8 @@ import type { Role } from '#shared/domain/people/role.ts';
 export interface Actor {
   readonly person: { readonly id: string; readonly name: string; readonly roles: readonly Role[] } | null;
   readonly terminal: { readonly id: string; readonly name: string; readonly bay: string } | null;
+  /** An instrument that sends by itself, known by its token. */
+  readonly instrument?: { readonly id: string; readonly name: string } | null;
   readonly via: 'desk' | 'terminal' | null;
 }
 

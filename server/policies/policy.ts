@@ -4,7 +4,7 @@ import type { Actor } from './actor.ts';
 export interface Policy<Subject = undefined> {
   readonly who: (actor: Actor) => boolean;
   /** What is said to those it refuses, where “sign in” or “not allowed” would mislead. */
-  readonly refusal?: 'terminal-not-enrolled';
+  readonly refusal?: 'terminal-not-enrolled' | 'token-refused';
   readonly when?: (actor: Actor, subject: Subject) => boolean;
 }
 

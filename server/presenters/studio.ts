@@ -15,5 +15,6 @@ export const presentStudio = (studio: StudioSettings, actor: Actor): Studio => (
   processTables: studio.processTables,
   limits: studio.limits,
   marksPlace: studio.marksPlace,
+  pyrometerCheckDays: studio.pyrometerCheckDays,
   abilities: { update: can(studioPolicy.update, actor, undefined) },
 });

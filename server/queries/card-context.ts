@@ -1,5 +1,7 @@
 import { markedMetal } from '#shared/domain/alloy/alloy-family.ts';
 import { belongsToWork, hazardsOf } from '#shared/domain/instruction/step-applies.ts';
+import { chooseCooling } from '#shared/domain/instrument/choose-cooling.ts';
+import type { CoolingFit } from '#shared/domain/instrument/fit-flask-cooling.ts';
 import { computeCardFigures } from '#shared/domain/pour-card/card-figures.ts';
 import type { CardContext, ChargeAlloy } from '#shared/domain/pour-card/card-state.ts';
 import type { StudioSettings } from '../models/studio-settings.ts';
@@ -19,11 +21,17 @@ export const chargeAlloyOf = ({
   markPpt: fineness,
 });
 
+/** What a card is built from beside its casting: the instruction in force, and how flasks of its size were seen to cool. */
+export interface CardGround {
+  readonly instruction: WorkInstructionRevision;
+  readonly coolingFit: CoolingFit | null;
+}
+
 /** What a casting's card is judged against today: figures from its alloy revision, tree, flask and the studio's tables. */
 export const cardContextOf = (
   casting: LoadedCasting,
   studio: StudioSettings,
-  { content }: WorkInstructionRevision,
+  { instruction: { content }, coolingFit }: CardGround,
 ): CardContext => {
   const { alloyRevision, tree, flask, method } = casting;
   const { family } = alloyRevision.alloy;
@@ -39,6 +47,7 @@ export const cardContextOf = (
       waxMassG: tree.waxMassG,
       flaskDiameterMm: flask.diameterMm,
       tables: studio.processTables,
+      cooling: chooseCooling(flask.diameterMm, studio.processTables.flaskCooling, coolingFit),
     }),
     limits: studio.limits,
     plannedMetalG: casting.plannedMetalG,

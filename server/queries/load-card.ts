@@ -4,6 +4,7 @@ import type { Services } from '../services/services.ts';
 import { cardContextOf } from './card-context.ts';
 import type { LoadedCasting } from './load-casting.ts';
 import { loadChargePlan, type LoadedChargePlan } from './load-charge-plan.ts';
+import { loadCoolingFit } from './load-flask-cooling.ts';
 import { loadInstruction } from './load-instruction.ts';
 import { loadMelt, type ListedMelt, type LoadedEvent } from './load-melt.ts';
 import { loadStudio } from './load-studio.ts';
@@ -27,10 +28,14 @@ export const loadCard = async (services: Services, casting: LoadedCasting): Prom
     const { context, workInstructionRevision, events } = melt;
     return { casting, context, instruction: workInstructionRevision, melt, events, chargePlan };
   }
-  const [studio, instruction] = await Promise.all([loadStudio(services), loadInstruction(services)]);
+  const [studio, instruction, coolingFit] = await Promise.all([
+    loadStudio(services),
+    loadInstruction(services),
+    loadCoolingFit(services, casting.flask.diameterMm),
+  ]);
   return {
     casting,
-    context: cardContextOf(casting, studio, instruction),
+    context: cardContextOf(casting, studio, { instruction, coolingFit }),
     instruction,
     melt: null,
     events: [],

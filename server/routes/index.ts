@@ -2,9 +2,13 @@ import { alloyRoutes } from './alloys.ts';
 import { cardRoutes } from './cards.ts';
 import { castingRoutes } from './castings.ts';
 import { chargeRoutes } from './charges.ts';
+import { coolingCurveRoutes } from './cooling-curves.ts';
 import type { Route } from './define-route.ts';
+import { flaskCoolingRoutes } from './flask-cooling.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
+import { instrumentReadingRoutes } from './instrument-readings.ts';
+import { instrumentRoutes } from './instruments.ts';
 import { ledgerRoutes } from './ledger.ts';
 import { lotDocumentRoutes } from './lot-documents.ts';
 import { lotIntakeRoutes } from './lot-intake.ts';
@@ -36,4 +40,8 @@ export const routes: readonly Route[] = [
   ...ledgerRoutes,
   ...chargeRoutes,
   ...reconciliationRoutes,
+  ...instrumentRoutes,
+  ...instrumentReadingRoutes,
+  ...flaskCoolingRoutes,
+  ...coolingCurveRoutes,
 ];

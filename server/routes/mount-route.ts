@@ -12,6 +12,12 @@ const authenticate = (actor: Actor, { who, refusal }: Policy<unknown>): void => 
   if (refusal === 'terminal-not-enrolled') {
     throw new AppError(refusal, 'This device is not a terminal yet. Type a code from the desk to enrol it.');
   }
+  if (refusal === 'token-refused') {
+    throw new AppError(
+      refusal,
+      'Send the token of an instrument or a terminal as “Authorization: Bearer …”; one that was ended no longer works.',
+    );
+  }
   if (actor.person === null) throw new AppError('not-signed-in', 'Sign in first.');
   throw new AppError('not-allowed', 'Your roles do not allow this. Ask the owner.');
 };

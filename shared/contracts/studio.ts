@@ -82,14 +82,24 @@ export const updateStudioRequest = z.object({
   limits: studioLimits,
   /** Whose fineness marks the studio works to; as it was when left out. */
   marksPlace: z.enum(markPlaces).optional(),
+  /** Days between two checks of an instrument; as it was when left out. */
+  pyrometerCheckDays: z
+    .int('Type whole days.')
+    .min(1, 'At least a day.')
+    .max(366, 'At most a year.')
+    .optional(),
 });
 /** Changes the studio's settings. */
 export type UpdateStudioRequest = z.infer<typeof updateStudioRequest>;
 
 /** The studio's settings. */
-export interface Studio extends Omit<UpdateStudioRequest, 'processTables' | 'limits' | 'marksPlace'> {
+export interface Studio extends Omit<
+  UpdateStudioRequest,
+  'processTables' | 'limits' | 'marksPlace' | 'pyrometerCheckDays'
+> {
   readonly processTables: ProcessTables;
   readonly limits: StudioLimits;
   readonly marksPlace: MarkPlace;
+  readonly pyrometerCheckDays: number;
   readonly abilities: Abilities<'update'>;
 }

@@ -3,15 +3,17 @@ import type { Response } from 'supertest';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { ProblemId } from '#shared/contracts/problem.ts';
 import { routes } from '#server/routes/index.ts';
+import { buildInstrument } from '#tests/factories/build-instrument.ts';
 import { buildTerminal } from '#tests/factories/build-terminal.ts';
 import { problemIdOf } from '#tests/support/problem-id.ts';
 import { startTestServer, type Client, type TestServer } from '#tests/support/test-server.ts';
 
-/** Everyone who may ask: nobody in particular, a device in three conditions, and each role at each place. */
+/** Everyone who may ask: nobody in particular, a device in three conditions, an instrument with its token, and each role at each place. */
 const callers = [
   'nobody',
   'unenrolled device',
   'idle terminal',
+  'instrument',
   'owner at the desk',
   'caster at the desk',
   'apprentice at the desk',
@@ -89,19 +91,39 @@ const whoGetsIn: Readonly<Record<string, readonly Caller[]>> = {
   'GET /api/charge-plans': [...decidersAtDesk, ...atTerminal],
   'GET /api/melts/:id/charge': [...decidersAtDesk, ...atTerminal],
   'POST /api/melts/:id/close-out': decidersAtDesk,
+  'GET /api/instruments': [...decidersAtDesk, ...atTerminal],
+  'POST /api/instruments': ownerAtDesk,
+  'POST /api/instruments/:id/revoke': ownerAtDesk,
+  'GET /api/instruments/:id/latest': [...decidersAtDesk, ...atTerminal],
+  'GET /api/instruments/:id/checks': [...decidersAtDesk, ...atTerminal],
+  'POST /api/instruments/:id/checks': [...decidersAtDesk, 'owner at a terminal', 'caster at a terminal'],
+  'POST /api/instrument-readings': [...enrolledDevices, 'instrument'],
+  'GET /api/flask-cooling': [...decidersAtDesk, ...atTerminal],
+  'POST /api/flask-cooling': [...decidersAtDesk, ...atTerminal],
+  'GET /api/melts/:id/cooling-curves': [...decidersAtDesk, ...atTerminal],
+  'POST /api/melts/:id/cooling-curves': [...decidersAtDesk, ...atTerminal],
 };
 
 /** Where a device, not a person, is wanted, those outside are told so. */
 const wantsTerminal = ['POST /api/session/terminal', 'GET /api/terminal/people'];
 
+/** Where a token is wanted, not a person. */
+const wantsToken = ['POST /api/instrument-readings'];
+
 const keyOf = ({ method, path }: { readonly method: string; readonly path: string }): string =>
   `${method.toUpperCase()} ${path}`;
 
-const refusals: readonly (ProblemId | null)[] = ['not-signed-in', 'not-allowed', 'terminal-not-enrolled'];
+const refusals: readonly (ProblemId | null)[] = [
+  'not-signed-in',
+  'not-allowed',
+  'terminal-not-enrolled',
+  'token-refused',
+];
 
 const expectedAnswer = (route: string, caller: Caller): string => {
   if (whoGetsIn[route]?.includes(caller)) return 'gets in';
   if (wantsTerminal.includes(route)) return 'terminal-not-enrolled';
+  if (wantsToken.includes(route)) return 'token-refused';
   return signedIn.includes(caller) ? 'not-allowed' : 'not-signed-in';
 };
 
@@ -120,6 +142,9 @@ beforeAll(async () => {
     nobody: server.nobody('desk'),
     'unenrolled device': server.nobody('terminal'),
     'idle terminal': server.atTerminal((await buildTerminal(server.services)).token),
+    instrument: server
+      .nobody()
+      .set('Authorization', `Bearer ${(await buildInstrument(server.services)).token}`),
     'owner at the desk': (await server.deskAs('owner')).client,
     'caster at the desk': (await server.deskAs('caster')).client,
     'apprentice at the desk': (await server.deskAs('apprentice')).client,

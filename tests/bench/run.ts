@@ -2,6 +2,7 @@ import { parseArgs } from 'node:util';
 import { benchCards } from './bench-cards.ts';
 import { benchCharge } from './charge.ts';
 import { benchClients } from './bench-clients.ts';
+import { benchCoolingCurve } from './cooling-curve.ts';
 import { benchEngine } from './engine.ts';
 
 const prefixed = (prefix: string, figures: Record<string, number>): Record<string, number> =>
@@ -11,6 +12,7 @@ const prefixed = (prefix: string, figures: Record<string, number>): Record<strin
 const parts: Readonly<Record<string, () => Promise<Record<string, number>>>> = {
   engine: async () => prefixed('engine', await benchEngine()),
   charge: async () => prefixed('charge', await benchCharge()),
+  curves: benchCoolingCurve,
   clients: benchClients,
   cards: benchCards,
 };

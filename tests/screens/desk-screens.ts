@@ -41,6 +41,7 @@ export const captureDesk = async (
   await shoot('/flasks', '37-flasks');
   await shoot('/people', '38-people');
   await shoot('/terminals', '39-terminals');
+  await shoot('/instruments', '39-instruments', true);
   await shoot('/studio', '40-studio', true);
   await shoot(`/print/flasks/${buildFlaskCode(147)}`, '41-print-plate');
   await shoot(`/print/castings/${casting.id}`, '42-print-traveller');

@@ -5,6 +5,7 @@ import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildMelt } from '#tests/factories/build-melt.ts';
 import { buildUser } from '#tests/factories/build-user.ts';
+import { buildInstrumentTargets } from './instrument-request-targets.ts';
 import { buildMetalTargets } from './metal-request-targets.ts';
 import { START, type Client, type TestServer } from './test-server.ts';
 
@@ -60,6 +61,7 @@ export const buildRequestTargets = async (
   };
   return {
     ...(await buildMetalTargets(server, owner)),
+    ...(await buildInstrumentTargets(server, owner)),
     'post /api/session/desk': {
       path: '/api/session/desk',
       client: server.nobody(),

@@ -2,6 +2,7 @@ import { Op } from 'sequelize';
 import { hashToken, pepperedPin, verifySecret } from '../hashing.ts';
 import type { Services } from '../services.ts';
 import { demoEnrolmentCode, demoPeople } from './people.ts';
+import { seedInstruments } from './seed-instruments.ts';
 import { seedLots } from './seed-lots.ts';
 import { seedPastMelts } from './seed-past-melts.ts';
 import { seedRecords } from './seed-records.ts';
@@ -32,6 +33,7 @@ export const seedDemoStudio = async (services: Services): Promise<boolean> => {
   });
   if (!records) return false;
   await seedPastMelts(services, records, await seedLots(services, records));
+  await seedInstruments(services, records);
   return true;
 };
 

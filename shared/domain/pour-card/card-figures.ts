@@ -4,10 +4,11 @@ import type { AlloyFigures } from '../alloy/alloy-figures.ts';
 import type { QuenchRule } from '../alloy/quench-rule.ts';
 import type { CastingMethod } from '../casting/casting-method.ts';
 import { bandOfSection } from '../casting/section-band.ts';
+import { chooseCooling, type ChosenCooling } from '../instrument/choose-cooling.ts';
 import type { ProcessTables, Range } from '../studio/process-tables.ts';
 import type { Basis } from './basis.ts';
 import { explainFigures } from './explain-figures.ts';
-import { coolingRateFor, secondsUntil } from './flask-cooling.ts';
+import { secondsUntil } from './flask-cooling.ts';
 
 /** The figures whose origin a pour card can show. */
 export type FigureKey =
@@ -55,6 +56,8 @@ export interface CardFiguresInput {
   readonly waxMassG: Grams;
   readonly flaskDiameterMm: number;
   readonly tables: ProcessTables;
+  /** The cooling constant chosen for this flask size; the table's where it is left out. */
+  readonly cooling?: ChosenCooling | undefined;
 }
 
 const middle = ({ low, high }: Range): number => (low + high) / 2;
@@ -73,7 +76,7 @@ export const computeCardFigures = (input: CardFiguresInput): CardFigures => {
   const band = bandOfSection(input.sectionMm);
   const superheat = tables.superheat[method][band];
   const flaskRange = tables.flask[input.family][band];
-  const cooling = coolingRateFor(input.flaskDiameterMm, tables.flaskCooling);
+  const cooling = input.cooling ?? chooseCooling(input.flaskDiameterMm, tables.flaskCooling, null);
   const pourC = {
     low: Math.ceil(alloy.liquidusC + superheat.low),
     target: Math.round(alloy.liquidusC + middle(superheat)),
@@ -96,5 +99,5 @@ export const computeCardFigures = (input: CardFiguresInput): CardFigures => {
     metalWantedG: metalForWax(input.waxMassG, alloy.densityGPerCm3, tables),
     quench: input.quench,
   };
-  return { ...numbers, basis: explainFigures(input, numbers, { superheat, flaskRange, band }) };
+  return { ...numbers, basis: explainFigures(input, numbers, { superheat, flaskRange, band, cooling }) };
 };

@@ -1,5 +1,6 @@
 import { castingMethodNames } from '../casting/casting-method.ts';
 import { sectionBandNames, type SectionBand } from '../casting/section-band.ts';
+import type { ChosenCooling } from '../instrument/choose-cooling.ts';
 import type { Range } from '../studio/process-tables.ts';
 import type { Basis, BasisInput } from './basis.ts';
 import type { CardFigures, CardFiguresInput, FigureKey } from './card-figures.ts';
@@ -9,6 +10,7 @@ export interface RowsUsed {
   readonly superheat: Range;
   readonly flaskRange: Range;
   readonly band: SectionBand;
+  readonly cooling: ChosenCooling;
 }
 
 type Numbers = Omit<CardFigures, 'basis'>;
@@ -55,7 +57,7 @@ const explainMelt = (
 const explainFlask = (
   { method, sectionMm, tables, flaskDiameterMm }: CardFiguresInput,
   numbers: Numbers,
-  { flaskRange }: RowsUsed,
+  { flaskRange, cooling }: RowsUsed,
 ): Record<'flaskHold' | 'flaskPour' | 'pourWindow', Basis> => {
   const hold: BasisInput = { label: 'Flask in the furnace', value: numbers.flaskHoldC, unit: 'C' };
   const place = method === 'vacuum' ? 'its middle for vacuum-assisted' : 'its lower end for centrifugal';
@@ -81,8 +83,9 @@ const explainFlask = (
         { label: 'Room', value: numbers.roomC, unit: 'C' },
         { label: 'Flask diameter', value: flaskDiameterMm, unit: 'mm' },
         { label: 'Cooling rate', value: numbers.coolingPerSecond, unit: 'perSecond' },
+        { label: 'Readings behind the rate', value: String(cooling.readings), unit: 'text' },
       ],
-      source: tables.sources.flaskCooling,
+      source: cooling.from === 'fitted' ? cooling.words : `${cooling.words} ${tables.sources.flaskCooling}`,
     },
   };
 };

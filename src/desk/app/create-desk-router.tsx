@@ -69,6 +69,12 @@ const pages: readonly RouteObject[] = [
     }),
   },
   {
+    path: 'instruments',
+    lazy: async () => ({
+      Component: (await import('../features/instruments/instruments-page.tsx')).InstrumentsPage,
+    }),
+  },
+  {
     path: 'studio',
     lazy: async () => ({ Component: (await import('../features/studio/studio-page.tsx')).StudioPage }),
   },

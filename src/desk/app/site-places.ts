@@ -44,6 +44,8 @@ export const siteGroups: readonly SiteGroup[] = [
     places: [
       { to: '/people', name: 'People', needs: 'managePeople' },
       { to: '/terminals', name: 'Terminals', needs: 'manageTerminals' },
+      { to: '/instruments', name: 'Instruments', needs: 'manageTerminals' },
+      { to: '/instructions', name: 'Instructions' },
       { to: '/studio', name: 'Settings', needs: 'editStudio' },
     ],
   },

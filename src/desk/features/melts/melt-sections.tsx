@@ -4,6 +4,7 @@ import { StateMark } from '#src/ui/state-mark.tsx';
 import { CardFiguresList } from '#src/desk/parts/card-figures-list.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { AmendForm } from './amend-form.tsx';
+import { CoolingCurveSection } from './cooling-curve-section.tsx';
 import { MeltBeamView } from './melt-beam-view.tsx';
 import { AmendmentNote, MeltEvents } from './melt-events.tsx';
 import { MetalAccount } from './metal-account.tsx';
@@ -89,6 +90,11 @@ export const MeltSections = ({ melt }: { readonly melt: Melt }) => {
               {rangeBasis === 'computed' ? 'computed' : 'measured, not computed'}. Press a figure to see where
               it comes from.
             </p>
+          </Section>
+        </div>
+        <div className="xl:col-span-2">
+          <Section id="cooling-curve" title="Cooling curve">
+            <CoolingCurveSection melt={melt} />
           </Section>
         </div>
         <Section id="entries" title="What happened">

@@ -39,5 +39,12 @@ export const LimitFields = (part: FormPart) => (
       hint="An apprentice always asks for one."
       {...part}
     />
+    <NumberField
+      path="pyrometerCheckDays"
+      label="Instruments are checked every"
+      unit="days"
+      hint="At a freezing point; later it is overdue."
+      {...part}
+    />
   </div>
 );

@@ -17,6 +17,7 @@ const fields: readonly Path<StudioValues>[] = [
   'massUnit',
   'timeZone',
   'idleLockS',
+  'pyrometerCheckDays',
   'limits',
   'processTables',
 ];

@@ -14,6 +14,7 @@ const studio: Studio = {
   processTables: defaultProcessTables,
   limits: defaultStudioLimits,
   marksPlace: 'ISO 9202',
+  pyrometerCheckDays: 30,
   abilities: { update: true },
 };
 
