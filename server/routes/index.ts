@@ -5,6 +5,7 @@ import { chargeRoutes } from './charges.ts';
 import type { Route } from './define-route.ts';
 import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
+import { instructionRoutes } from './instructions.ts';
 import { ledgerRoutes } from './ledger.ts';
 import { lotDocumentRoutes } from './lot-documents.ts';
 import { lotIntakeRoutes } from './lot-intake.ts';
@@ -30,6 +31,7 @@ export const routes: readonly Route[] = [
   ...cardRoutes,
   ...meltRoutes,
   ...photographRoutes,
+  ...instructionRoutes,
   ...lotRoutes,
   ...lotDocumentRoutes,
   ...lotIntakeRoutes,
