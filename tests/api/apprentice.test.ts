@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
+import type { Countersigned } from '#shared/domain/instruction/instruction-step.ts';
 import type { Person } from '#shared/contracts/person.ts';
 import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
@@ -95,7 +96,7 @@ describe('what an apprentice does', () => {
     const key = 'apprentice-pour';
     expect(sentenceOf(await card.send({ type: 'step-skipped', key }))).toMatch(/skips no step/);
     const forged = { id: randomUUID(), personId: signer.id, name: signer.name, onDevice: false };
-    const signed = (by: typeof forged) =>
+    const signed = (by: Countersigned) =>
       ({ type: 'step-done', key, answer: { kind: 'countersign', by } }) as const;
     expect(sentenceOf(await card.send(signed(forged)))).toMatch(/not on record/);
     const own = { ...forged, personId: user.id, name: user.name };

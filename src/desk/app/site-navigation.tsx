@@ -18,6 +18,7 @@ const places: readonly Place[] = [
   { to: '/alloys', name: 'Alloys' },
   { to: '/metal', name: 'Metal', roles: ['owner', 'caster'] },
   { to: '/flasks', name: 'Flasks' },
+  { to: '/instructions', name: 'Instruction' },
   { to: '/people', name: 'People', needs: 'managePeople' },
   { to: '/terminals', name: 'Terminals', needs: 'manageTerminals' },
   { to: '/studio', name: 'Studio', needs: 'editStudio' },
