@@ -13,6 +13,7 @@ import type { Services } from '../services/services.ts';
 import { appendEvent, keyUsed } from './append-event.ts';
 import { lockRow } from './lock-row.ts';
 import { refuseUnsigned } from './refuse-unsigned.ts';
+import { tellOfStop } from './tell-of-stop.ts';
 import { withCertificate } from './with-certificate.ts';
 
 type RecordEvent = z.output<typeof recordEventRequest>;
@@ -64,18 +65,24 @@ const lockMelt = async ({ models }: Services, id: string): Promise<Melt> => {
   return melt;
 };
 
-/** Records one event of a card, exactly once however often it is delivered. */
-export const recordEvent = (
+interface Recorded {
+  readonly melt: Melt;
+  readonly event: MeltEvent;
+  /** False for an event that was delivered before. */
+  readonly isNew: boolean;
+}
+
+const recordOnce = (
   services: Services,
   actor: AtTerminal,
   meltId: string,
   request: RecordEvent,
-): Promise<MeltEvent> =>
+): Promise<Recorded> =>
   services.sequelize.transaction(async () => {
     const melt = await lockMelt(services, meltId);
     const reported = judged(melt, request.event);
     const recorded = await alreadyRecorded(services, melt, request.key, reported);
-    if (recorded) return recorded;
+    if (recorded) return { melt, event: recorded, isNew: false };
     if (!can(meltPolicy.record, actor, melt)) {
       throw new AppError(
         'card-elsewhere',
@@ -84,6 +91,19 @@ export const recordEvent = (
     }
     refuseUndecided(actor, melt, reported);
     await refuseUnsigned(services, melt, reported);
-    const event = await withCertificate(services, reported);
-    return appendEvent(services, actor, melt, { ...request, event });
+    const certified = await withCertificate(services, reported);
+    const event = await appendEvent(services, actor, melt, { ...request, event: certified });
+    return { melt, event, isNew: true };
   });
+
+/** Records one event of a card, exactly once however often it is delivered; the owners are told when it stops the work. */
+export const recordEvent = async (
+  services: Services,
+  actor: AtTerminal,
+  meltId: string,
+  request: RecordEvent,
+): Promise<MeltEvent> => {
+  const { melt, event, isNew } = await recordOnce(services, actor, meltId, request);
+  if (isNew && event.event.type === 'stopped') tellOfStop(services, actor, melt);
+  return event;
+};

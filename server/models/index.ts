@@ -74,6 +74,7 @@ const associate = (): void => {
   Melt.belongsTo(Casting, { as: 'casting', foreignKey: 'castingId', constraints: false });
   Melt.hasMany(MeltEvent, { as: 'events', foreignKey: 'meltId' });
   Melt.hasMany(MeltAmendment, { as: 'amendments', foreignKey: 'meltId' });
+  Melt.hasMany(Photograph, { as: 'photographs', foreignKey: 'meltId' });
   Melt.belongsTo(AlloyRevision, { as: 'alloyRevision', foreignKey: 'alloyRevisionId' });
   Melt.belongsTo(WorkInstructionRevision, {
     as: 'workInstructionRevision',

@@ -7,11 +7,9 @@ import {
   type NonAttribute,
   type Sequelize,
 } from 'sequelize';
+import type { InstructionStatus } from '#shared/contracts/instruction.ts';
 import type { WorkInstruction } from '#shared/domain/instruction/work-instruction.ts';
 import type { User } from './user.ts';
-
-/** Where a revision of the work instruction stands; only an approved one is worked by. */
-export type InstructionStatus = 'draft' | 'approved' | 'dropped';
 
 /** A revision of the work instruction; a running card keeps the one it began with. */
 export class WorkInstructionRevision extends Model<

@@ -9,6 +9,8 @@ export const personPolicy = {
   create: { who: ownerAtDesk },
   update: { who: ownerAtDesk },
   unlock: { who: ownerAtDesk },
+  /** What an apprentice did under supervision. */
+  readSupervised: { who: ownerAtDesk },
   /** A terminal shows the names of those who may sign in at it. */
   listAtTerminal: { who: ({ terminal }: Actor) => terminal !== null, refusal: 'terminal-not-enrolled' },
 } satisfies Record<string, Policy>;

@@ -5,6 +5,7 @@ import type { MeltAmendment } from '../models/melt-amendment.ts';
 import type { MeltEvent } from '../models/melt-event.ts';
 import type { Melt } from '../models/melt.ts';
 import type { Models } from '../models/index.ts';
+import type { Photograph } from '../models/photograph.ts';
 import type { Terminal } from '../models/terminal.ts';
 import type { User } from '../models/user.ts';
 import type { WorkInstructionRevision } from '../models/work-instruction-revision.ts';
@@ -27,6 +28,7 @@ export type LoadedMelt = ListedMelt & {
   readonly workInstructionRevision: WorkInstructionRevision;
   readonly events: LoadedEvent[];
   readonly amendments: (MeltAmendment & { readonly user: User })[];
+  readonly photographs: (Photograph & { readonly user: User })[];
 };
 
 /** What to load with a melt for its line in the book. */
@@ -64,6 +66,13 @@ export const loadMelt = async (services: Services, id: string): Promise<LoadedMe
         as: 'amendments',
         separate: true,
         order: [['id', 'ASC']],
+        include: [{ model: models.User, as: 'user' }],
+      },
+      {
+        model: models.Photograph,
+        as: 'photographs',
+        separate: true,
+        order: [['createdAt', 'ASC']],
         include: [{ model: models.User, as: 'user' }],
       },
     ],

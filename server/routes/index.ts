@@ -9,6 +9,7 @@ import { flaskRoutes } from './flasks.ts';
 import { healthRoutes } from './health.ts';
 import { instrumentReadingRoutes } from './instrument-readings.ts';
 import { instrumentRoutes } from './instruments.ts';
+import { instructionRoutes } from './instructions.ts';
 import { ledgerRoutes } from './ledger.ts';
 import { lotDocumentRoutes } from './lot-documents.ts';
 import { lotIntakeRoutes } from './lot-intake.ts';
@@ -34,6 +35,7 @@ export const routes: readonly Route[] = [
   ...cardRoutes,
   ...meltRoutes,
   ...photographRoutes,
+  ...instructionRoutes,
   ...lotRoutes,
   ...lotDocumentRoutes,
   ...lotIntakeRoutes,

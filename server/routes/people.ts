@@ -3,9 +3,12 @@ import { idParams } from '#shared/contracts/common.ts';
 import { createPerson } from '../commands/create-person.ts';
 import { unlockPerson } from '../commands/unlock-person.ts';
 import { updatePerson } from '../commands/update-person.ts';
+import { sendDownload } from '../middlewares/send-download.ts';
 import { personPolicy } from '../policies/person.ts';
 import { presentPerson, presentPersonAtTerminal } from '../presenters/person.ts';
+import { listSupervised } from '../queries/list-supervised.ts';
 import { listPeople, listPeopleAtTerminal, loadPerson } from '../queries/load-person.ts';
+import { supervisedCsv } from '../services/reports/supervised-csv.ts';
 import { defineRoute } from './define-route.ts';
 
 const list = defineRoute({
@@ -50,4 +53,24 @@ const unlock = defineRoute({
     presentPerson(await unlockPerson(services, await loadPerson(services, params.id)), actor),
 });
 
-export const peopleRoutes = [list, listAtTerminal, create, update, unlock];
+const supervised = defineRoute({
+  method: 'get',
+  path: '/api/people/:id/supervised',
+  policy: personPolicy.readSupervised,
+  params: idParams,
+  act: async ({ services, params }) => listSupervised(services, (await loadPerson(services, params.id)).id),
+});
+
+const supervisedAsCsv = defineRoute({
+  method: 'get',
+  path: '/api/people/:id/supervised.csv',
+  policy: personPolicy.readSupervised,
+  params: idParams,
+  act: async ({ services, params, http }) => {
+    const { id, name } = await loadPerson(services, params.id);
+    const csv = supervisedCsv(name, await listSupervised(services, id));
+    sendDownload(http, 'text/csv; charset=utf-8', `supervised-${id}.csv`, csv);
+  },
+});
+
+export const peopleRoutes = [list, listAtTerminal, create, update, unlock, supervised, supervisedAsCsv];

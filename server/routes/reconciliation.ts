@@ -1,18 +1,11 @@
 import { reconciliationQuery } from '#shared/contracts/reconciliation.ts';
-import type { Http } from '../middlewares/http.ts';
+import { sendDownload } from '../middlewares/send-download.ts';
 import { ledgerPolicy } from '../policies/ledger.ts';
 import { loadStudio } from '../queries/load-studio.ts';
 import { readReconciliation } from '../queries/read-reconciliation.ts';
 import { monthCsv } from '../services/reports/month-csv.ts';
 import { monthPdf } from '../services/reports/month-pdf.ts';
 import { defineRoute } from './define-route.ts';
-
-const download = ({ response }: Http, type: string, name: string, content: string | Buffer): void => {
-  response
-    .set({ 'Content-Disposition': `attachment; filename="${name}"`, 'Cache-Control': 'private, no-store' })
-    .type(type)
-    .send(content);
-};
 
 const read = defineRoute({
   method: 'get',
@@ -29,7 +22,7 @@ const asCsv = defineRoute({
   query: reconciliationQuery,
   act: async ({ services, query, http }) => {
     const month = await readReconciliation(services, query.month);
-    download(http, 'text/csv; charset=utf-8', `metal-${query.month}.csv`, monthCsv(month));
+    sendDownload(http, 'text/csv; charset=utf-8', `metal-${query.month}.csv`, monthCsv(month));
   },
 });
 
@@ -42,7 +35,7 @@ const asPdf = defineRoute({
     const { name } = await loadStudio(services);
     const month = await readReconciliation(services, query.month);
     const pdf = await monthPdf(month, { studio: name, printedAt: services.now() });
-    download(http, 'application/pdf', `metal-${query.month}.pdf`, pdf);
+    sendDownload(http, 'application/pdf', `metal-${query.month}.pdf`, pdf);
   },
 });
 

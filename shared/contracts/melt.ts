@@ -1,7 +1,8 @@
 import { z } from 'zod';
+import type { InstructionStep } from '#shared/domain/instruction/instruction-step.ts';
 import type { CardContext, CardState } from '#shared/domain/pour-card/card-state.ts';
 import type { Casting } from './casting.ts';
-import type { MeltEvent } from './card.ts';
+import type { MeltEvent, Photograph } from './card.ts';
 import { words, type Abilities } from './common.ts';
 
 /** Adds a remark to a melt; what was written stays. `seq` names the event it corrects, null for the melt as a whole. */
@@ -29,6 +30,8 @@ export interface MeltSummary {
   readonly flaskCode: string;
   readonly step: CardState['step'];
   readonly stopped: boolean;
+  /** Why and since when work on it is stopped; null while it is not. */
+  readonly stop: { readonly sentence: string; readonly at: string } | null;
   readonly openedAt: string;
   readonly pouredAt: string | null;
   readonly pourMeltC: number | null;
@@ -38,6 +41,10 @@ export interface MeltSummary {
   readonly person: string;
   readonly terminal: string;
   readonly departures: number;
+  /** Departures that still want their reason. */
+  readonly openVariances: number;
+  /** Whether a reason on it asks for its pieces to be held. */
+  readonly holdsPieces: boolean;
 }
 
 /** A page of the melt book. */
@@ -62,8 +69,11 @@ export interface Melt extends MeltSummary {
   readonly rangeBasis: 'computed' | 'measured';
   readonly context: CardContext;
   readonly instructionRevision: number;
+  /** The instruction's steps that belong to this work, in order. */
+  readonly steps: readonly InstructionStep[];
   readonly state: CardState;
   readonly events: readonly MeltEvent[];
   readonly amendments: readonly Amendment[];
+  readonly photographs: readonly Photograph[];
   readonly abilities: Abilities<'amend'>;
 }

@@ -19,6 +19,18 @@ export const meltQuery = (id: string) =>
     refetchInterval: 5_000,
   });
 
+/** Where a photograph of a melt is kept. */
+export const photographPath = (meltId: string, id: string): string =>
+  `/api/melts/${meltId}/photographs/${id}`;
+
+/** The picture itself; it never changes. */
+export const photographQuery = (meltId: string, id: string) =>
+  queryOptions({
+    queryKey: ['melts', meltId, 'photographs', id],
+    queryFn: () => http.blob(photographPath(meltId, id)),
+    staleTime: Infinity,
+  });
+
 /** Adds a remark to a melt. */
 export const useAmendMelt = (id: string) => {
   const client = useQueryClient();

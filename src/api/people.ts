@@ -5,6 +5,7 @@ import type {
   PersonAtTerminal,
   UpdatePersonRequest,
 } from '#shared/contracts/person.ts';
+import type { SupervisedStep } from '#shared/contracts/supervised.ts';
 import { http } from '#src/lib/http.ts';
 
 /** Everyone in the studio, for the owner. */
@@ -18,6 +19,16 @@ export const peopleAtTerminalQuery = queryOptions({
   queryKey: ['people', 'terminal'],
   queryFn: () => http.get<PersonAtTerminal[]>('/api/terminal/people'),
 });
+
+/** What a person did under supervision as an apprentice, newest first. */
+export const supervisedQuery = (id: string) =>
+  queryOptions({
+    queryKey: ['people', id, 'supervised'],
+    queryFn: () => http.get<SupervisedStep[]>(`/api/people/${id}/supervised`),
+  });
+
+/** Where the same is had as a CSV file. */
+export const supervisedCsvPath = (id: string): string => `/api/people/${id}/supervised.csv`;
 
 const usePeopleChange = <Request>(send: (request: Request) => Promise<Person>) => {
   const client = useQueryClient();

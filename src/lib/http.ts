@@ -98,9 +98,21 @@ const request = async <Answer>(method: string, path: string, content: Content): 
   return answer as Answer;
 };
 
+/** The bytes of a file that the API keeps; what they are, the answer's own type says. */
+const requestBlob = async (path: string): Promise<Blob> => {
+  const response = await send('GET', path, nothing);
+  if (!response.ok) throw new ProblemError((await readJson(response)) as Problem);
+  try {
+    return await response.blob();
+  } catch {
+    throw new UnreachableError();
+  }
+};
+
 /** Requests to our own API; rejects with a ProblemError or an UnreachableError. */
 export const http = {
   get: <Answer>(path: string): Promise<Answer> => request('GET', path, nothing),
+  blob: requestBlob,
   post: <Answer>(path: string, body?: unknown): Promise<Answer> => request('POST', path, asJson(body)),
   patch: <Answer>(path: string, body: unknown): Promise<Answer> => request('PATCH', path, asJson(body)),
   /** Sends a file as it is, as the whole body; two minutes at most. */

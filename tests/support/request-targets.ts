@@ -1,4 +1,5 @@
 import { randomUUID } from 'node:crypto';
+import { defaultInstruction } from '#shared/domain/instruction/default-instruction.ts';
 import { defaultProcessTables } from '#shared/domain/studio/process-tables.ts';
 import { defaultStudioLimits } from '#shared/domain/studio/studio-limits.ts';
 import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
@@ -6,6 +7,7 @@ import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildMelt } from '#tests/factories/build-melt.ts';
 import { buildUser } from '#tests/factories/build-user.ts';
 import { buildInstrumentTargets } from './instrument-request-targets.ts';
+import { buildInstructionDraft } from '#tests/factories/build-instruction-draft.ts';
 import { buildMetalTargets } from './metal-request-targets.ts';
 import { START, type Client, type TestServer } from './test-server.ts';
 
@@ -39,6 +41,8 @@ export const buildRequestTargets = async (
   const casting = await buildCasting(services);
   const moving = await buildCasting(services, { state: 'invested' });
   const draft = await buildAlloyRevision(services, { status: 'draft' });
+  const instruction = await buildInstructionDraft(services);
+  const approvable = await buildInstructionDraft(services);
   const melt = await buildMelt(services, { user: furnace.user, terminal: furnace.terminal, step: 'charge' });
   const device = server.atTerminal(furnace.token);
   const studio = {
@@ -87,6 +91,26 @@ export const buildRequestTargets = async (
       path: `/api/people/${person.id}`,
       client: owner,
       good: { name: 'Someone', email: 'a@example.org', roles: ['caster'], active: true },
+    },
+    'post /api/instructions': {
+      path: '/api/instructions',
+      client: owner,
+      good: { from: instruction.id },
+    },
+    'patch /api/instructions/:id': {
+      path: `/api/instructions/${instruction.id}`,
+      client: owner,
+      good: { version: 1, content: defaultInstruction, note: 'A note.' },
+    },
+    'post /api/instructions/:id/drop': {
+      path: `/api/instructions/${instruction.id}/drop`,
+      client: owner,
+      good: { version: 1 },
+    },
+    'post /api/instructions/:id/approve': {
+      path: `/api/instructions/${approvable.id}/approve`,
+      client: owner,
+      good: { version: 1, exception: '' },
     },
     'patch /api/studio': { path: '/api/studio', client: owner, good: studio },
     'post /api/alloys': {

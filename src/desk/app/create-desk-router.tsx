@@ -51,6 +51,18 @@ const pages: readonly RouteObject[] = [
     lazy: async () => ({ Component: (await import('../features/flasks/flasks-page.tsx')).FlasksPage }),
   },
   {
+    path: 'instructions',
+    lazy: async () => ({
+      Component: (await import('../features/instructions/instructions-page.tsx')).InstructionsPage,
+    }),
+  },
+  {
+    path: 'instructions/:instructionId',
+    lazy: async () => ({
+      Component: (await import('../features/instructions/instruction-page.tsx')).InstructionPage,
+    }),
+  },
+  {
     path: 'people',
     lazy: async () => ({ Component: (await import('../features/people/people-page.tsx')).PeoplePage }),
   },
@@ -97,6 +109,12 @@ const prints: readonly RouteObject[] = [
   {
     path: 'print/lots/:lotId',
     lazy: async () => ({ Component: (await import('../features/metal/lot-label-page.tsx')).LotLabelPage }),
+  },
+  {
+    path: 'print/instructions/:instructionId',
+    lazy: async () => ({
+      Component: (await import('../features/instructions/print-instruction-page.tsx')).PrintInstructionPage,
+    }),
   },
   {
     path: 'print/castings/:castingId',

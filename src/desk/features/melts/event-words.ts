@@ -29,25 +29,35 @@ const photographed: Readonly<Record<PhotographSubject, string>> = {
   other: 'work',
 };
 
-const answerWords = (answer: StepAnswer, { mass, temperature }: Units): string => {
+/** What was answered at a step, in the studio's units; empty where being done is all. */
+export const answerWords = (answer: StepAnswer, { mass, temperature }: Units): string => {
   switch (answer.kind) {
     case 'weigh':
-      return `: ${formatMass(answer.massG, mass)}`;
+      return formatMass(answer.massG, mass);
     case 'read':
-      return `: ${formatTemperature(answer.temperatureC, temperature)}`;
+      return formatTemperature(answer.temperatureC, temperature);
     case 'scan':
-      return `: ${answer.code}`;
+      return answer.code;
     case 'choose':
-      return `: “${answer.option}”`;
+      return `“${answer.option}”`;
     case 'countersign':
-      return `, signed by ${answer.by.name}${answer.by.onDevice ? ' without the server' : ''}`;
+      return `signed by ${answer.by.name}${answer.by.onDevice ? ', PIN checked by the terminal alone' : ''}`;
     default:
       return '';
   }
 };
 
-/** One entry of the melt book as a sentence, in the studio's units. */
-export const eventWords = (event: CardEvent, units: Units): string => {
+const doneWords = (answer: StepAnswer, units: Units): string => {
+  const said = answerWords(answer, units);
+  return said ? `done: ${said}` : 'done';
+};
+
+/** One entry of the melt book as a sentence, in the studio's units; `sentenceOf` names a step of the instruction by its key. */
+export const eventWords = (
+  event: CardEvent,
+  units: Units,
+  sentenceOf: (key: string) => string = (key) => key,
+): string => {
   const mass = (grams: number): string => formatMass(grams, units.mass);
   const degrees = (celsius: number): string => formatTemperature(celsius, units.temperature);
   switch (event.type) {
@@ -58,11 +68,11 @@ export const eventWords = (event: CardEvent, units: Units): string => {
     case 'guard-confirmed':
       return `${event.prompts.length} safety points confirmed.`;
     case 'checked':
-      return `${event.keys.length} ${event.keys.length === 1 ? 'point' : 'points'} checked.`;
+      return `Checked: ${event.keys.map(sentenceOf).join(' ')}`;
     case 'step-done':
-      return `Step “${event.key}” done${answerWords(event.answer, units)}.`;
+      return `“${sentenceOf(event.key)}” ${doneWords(event.answer, units)}.`;
     case 'step-skipped':
-      return `Step “${event.key}” skipped.`;
+      return `“${sentenceOf(event.key)}” skipped.`;
     case 'variance-explained':
       return `Reason given: ${varianceReasonNames[event.reason].toLowerCase()}${event.words ? `, “${event.words}”` : ''}${event.by ? `; signed by ${event.by.name}` : ''}${event.hold ? '; pieces held' : ''}.`;
     case 'photographed':

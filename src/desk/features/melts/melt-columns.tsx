@@ -30,8 +30,17 @@ const figure = (
   meta: { align: 'right' },
 });
 
-const departures = (count: number) =>
-  count === 0 ? none : <StateMark state="caution" text={String(count)} size="row" />;
+const Departures = ({ melt }: { readonly melt: MeltSummary }) => {
+  const { departures, openVariances, holdsPieces } = melt;
+  if (departures === 0) return none;
+  return (
+    <span className="grid gap-0.5">
+      <StateMark state="caution" text={String(departures)} size="row" />
+      {openVariances > 0 ? <StateMark state="wait" text={`${openVariances} open`} size="row" /> : null}
+      {holdsPieces ? <StateMark state="stop" text="pieces held" size="row" /> : null}
+    </span>
+  );
+};
 
 /** The columns of the melt book in the studio's units and time. */
 export const meltColumns = ({ clock, mass, temperature }: StudioWriting): readonly Column[] => [
@@ -78,7 +87,7 @@ export const meltColumns = ({ clock, mass, temperature }: StudioWriting): readon
     id: 'departures',
     header: 'Departures',
     accessorFn: (melt) => melt.departures,
-    cell: ({ row }) => departures(row.original.departures),
+    cell: ({ row }) => <Departures melt={row.original} />,
   },
   {
     id: 'state',

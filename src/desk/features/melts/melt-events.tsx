@@ -3,6 +3,7 @@ import type { MeltEvent } from '#shared/contracts/card.ts';
 import { formatClock } from '#shared/lib/units.ts';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { eventWords, recordedLateS } from './event-words.ts';
+import { sentenceOfStep } from './step-records.ts';
 
 /** A remark added later, with who and when. */
 export const AmendmentNote = ({ amendment }: { readonly amendment: Amendment }) => {
@@ -20,9 +21,11 @@ export const AmendmentNote = ({ amendment }: { readonly amendment: Amendment }) 
 interface EntryProps {
   readonly entry: MeltEvent;
   readonly amendments: readonly Amendment[];
+  /** The sentence of a step by its key. */
+  readonly sentenceOf: (key: string) => string;
 }
 
-const Entry = ({ entry, amendments }: EntryProps) => {
+const Entry = ({ entry, amendments, sentenceOf }: EntryProps) => {
   const { clock, units } = useStudio();
   const late = recordedLateS(entry.occurredAt, entry.recordedAt);
   const where = entry.terminal ? `${entry.person}, ${entry.terminal}` : entry.person;
@@ -34,7 +37,7 @@ const Entry = ({ entry, amendments }: EntryProps) => {
       </time>
       <div className="grid gap-2">
         <p className="flex flex-wrap justify-between gap-x-6">
-          <span className="font-extrabold">{eventWords(entry.event, units)}</span>
+          <span className="font-extrabold">{eventWords(entry.event, units, sentenceOf)}</span>
           <span className="text-[15px] text-soft">{where}</span>
         </p>
         {late === null ? null : (
@@ -57,6 +60,7 @@ export const MeltEvents = ({ melt }: { readonly melt: Melt }) => (
       <Entry
         key={entry.key}
         entry={entry}
+        sentenceOf={sentenceOfStep(melt)}
         amendments={melt.amendments.filter(({ seq }) => seq === entry.seq)}
       />
     ))}

@@ -1,15 +1,17 @@
 import type { ReactNode } from 'react';
 import type { Melt } from '#shared/contracts/melt.ts';
-import { StateMark } from '#src/ui/state-mark.tsx';
 import { CardFiguresList } from '#src/desk/parts/card-figures-list.tsx';
-import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { AmendForm } from './amend-form.tsx';
 import { CoolingCurveSection } from './cooling-curve-section.tsx';
+import { HandOvers } from './hand-overs.tsx';
 import { MeltBeamView } from './melt-beam-view.tsx';
 import { AmendmentNote, MeltEvents } from './melt-events.tsx';
 import { MetalAccount } from './metal-account.tsx';
+import { Photographs } from './photographs.tsx';
 import { PourSummary } from './pour-summary.tsx';
 import { ReadingsChart } from './readings-chart.tsx';
+import { StepsDone } from './steps-done.tsx';
+import { Variances } from './variances.tsx';
 
 interface SectionProps {
   readonly id: string;
@@ -25,24 +27,6 @@ const Section = ({ id, title, children }: SectionProps) => (
     {children}
   </section>
 );
-
-const Departures = ({ melt }: { readonly melt: Melt }) => {
-  const { clock } = useStudio();
-  const { departures } = melt.state;
-  if (departures.length === 0) return null;
-  return (
-    <section aria-label="Departures from the card" className="mb-8 border-y-[3px] border-ink py-4">
-      <ul className="grid gap-2">
-        {departures.map(({ sentence, at, kind }) => (
-          <li key={`${kind}-${at}`} className="flex flex-wrap items-baseline justify-between gap-x-6">
-            <StateMark state="caution" text={sentence} size="row" />
-            <span className="text-[15px] text-soft">{clock.exactTime(at)}</span>
-          </li>
-        ))}
-      </ul>
-    </section>
-  );
-};
 
 const Remarks = ({ melt }: { readonly melt: Melt }) => {
   const whole = melt.amendments.filter(({ seq }) => seq === null);
@@ -62,7 +46,7 @@ export const MeltSections = ({ melt }: { readonly melt: Melt }) => {
   const { rangeBasis, casting, instructionRevision } = melt;
   return (
     <>
-      <Departures melt={melt} />
+      <Variances melt={melt} />
       <div className="grid gap-x-14 gap-y-12 xl:grid-cols-[minmax(0,1fr)_400px]">
         <Section id="readings" title="Readings">
           <ReadingsChart melt={melt} />
@@ -95,6 +79,17 @@ export const MeltSections = ({ melt }: { readonly melt: Melt }) => {
         <div className="xl:col-span-2">
           <Section id="cooling-curve" title="Cooling curve">
             <CoolingCurveSection melt={melt} />
+          </Section>
+        </div>
+        <Section id="steps" title="Steps of the instruction">
+          <StepsDone melt={melt} />
+        </Section>
+        <div className="grid content-start gap-12">
+          <Section id="people" title="Who had the card">
+            <HandOvers melt={melt} />
+          </Section>
+          <Section id="photographs" title="Photographs">
+            <Photographs melt={melt} />
           </Section>
         </div>
         <Section id="entries" title="What happened">

@@ -9,6 +9,7 @@ import { buttonClass } from '#src/ui/button-class.ts';
 import { CheckField } from '#src/ui/check-field.tsx';
 import { FieldError } from '#src/ui/field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
+import { ApprenticeFields } from './apprentice-fields.tsx';
 import { applyProblem } from '#src/desk/parts/apply-problem.ts';
 import { FormProblem } from '#src/desk/parts/form-problem.tsx';
 import type { PersonValues } from './person-values.ts';
@@ -95,7 +96,7 @@ const Secrets = ({
 
 /** A person's form; what was typed stays when the server refuses it, with the reason at its field. */
 export const PersonForm = <Request,>(props: PersonFormProps<Request>) => {
-  const { register, handleSubmit, setError, formState } = useForm<PersonValues, unknown, Request>({
+  const { register, control, handleSubmit, setError, formState } = useForm<PersonValues, unknown, Request>({
     resolver: zodResolver(props.schema),
     defaultValues: props.values,
   });
@@ -139,6 +140,7 @@ export const PersonForm = <Request,>(props: PersonFormProps<Request>) => {
         <Roles register={register} errors={errors} />
         <Secrets register={register} errors={errors} isChange={props.isChange} hasPin={props.hasPin} />
       </div>
+      {props.isChange ? <ApprenticeFields control={control} /> : null}
       <FormProblem sentence={errors.root?.server?.message} />
       <p className="flex flex-wrap gap-3">
         <Button type="submit" kind="main" busy={isSubmitting}>

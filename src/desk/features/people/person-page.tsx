@@ -7,6 +7,7 @@ import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
 import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { PersonForm } from './person-form.tsx';
+import { SupervisedPanel } from './supervised-panel.tsx';
 import { changedPersonForm, valuesOf } from './person-values.ts';
 import { UnlockButton } from './unlock-button.tsx';
 
@@ -32,6 +33,7 @@ const ChangePerson = ({ person }: { readonly person: Person }) => {
           await navigate('/people');
         }}
       />
+      <SupervisedPanel person={person} />
     </>
   );
 };

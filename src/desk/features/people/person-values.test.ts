@@ -1,5 +1,12 @@
 import { describe, expect, it } from 'vitest';
-import { changedPersonForm, emptyPerson, newPersonForm, type PersonValues } from './person-values.ts';
+import type { Person } from '#shared/contracts/person.ts';
+import {
+  changedPersonForm,
+  emptyPerson,
+  newPersonForm,
+  valuesOf,
+  type PersonValues,
+} from './person-values.ts';
 
 const typed: PersonValues = {
   ...emptyPerson,
@@ -47,6 +54,36 @@ describe('changedPersonForm', () => {
     expect(changedPersonForm.parse({ ...typed, pin: '246802' })).toMatchObject({ pin: '246802' });
     expect(changedPersonForm.parse({ ...typed, pin: '246802', removePin: true })).toMatchObject({
       pin: null,
+    });
+  });
+});
+
+describe('the limits of an apprentice', () => {
+  const apprentice: PersonValues = { ...typed, roles: ['apprentice'] };
+  const limitsOf = (values: PersonValues) => changedPersonForm.parse(values).apprenticeship;
+
+  it('are none, or some alloys and parts; the guard is always theirs and the pour is one', () => {
+    expect(limitsOf(apprentice)).toEqual({ alloyIds: null, parts: null });
+    const alloyIds = ['3f0b2c9e-5a44-4b0e-9d55-0a6a52a6c6d1'];
+    const some = { ...apprentice, everyAlloy: false, alloyIds, everyPart: false };
+    expect(limitsOf({ ...some, parts: ['charge', 'pour'] })).toEqual({
+      alloyIds,
+      parts: ['guard', 'charge', 'flask-out', 'pour', 'quench'],
+    });
+  });
+
+  it('are not sent for someone who works as a caster too', () => {
+    expect(limitsOf({ ...apprentice, roles: ['apprentice', 'caster'], everyPart: false })).toBeUndefined();
+  });
+
+  it('come back into the form as they went out', () => {
+    const parts = ['guard', 'melt', 'close'] as const;
+    const person = { ...typed, apprenticeship: { alloyIds: [], parts } } as unknown as Person;
+    expect(valuesOf(person)).toMatchObject({
+      everyAlloy: false,
+      alloyIds: [],
+      everyPart: false,
+      parts: ['melt', 'close'],
     });
   });
 });

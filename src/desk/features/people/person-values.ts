@@ -6,7 +6,21 @@ import {
   type Person,
   type UpdatePersonRequest,
 } from '#shared/contracts/person.ts';
+import { workerRoleOf, type Apprenticeship } from '#shared/domain/people/apprenticeship.ts';
 import type { Role } from '#shared/domain/people/role.ts';
+import type { CardStep } from '#shared/domain/pour-card/card-step.ts';
+
+/** What an apprentice may be kept from; flask out, pour and quench follow one another too fast to be parted. */
+export const partChoices = ['charge', 'melt', 'pour', 'close'] as const;
+/** One of them. */
+export type PartChoice = (typeof partChoices)[number];
+
+const partsOf: Readonly<Record<PartChoice, readonly CardStep[]>> = {
+  charge: ['charge'],
+  melt: ['melt'],
+  pour: ['flask-out', 'pour', 'quench'],
+  close: ['close'],
+};
 
 /** A person's form as it is typed. */
 export interface PersonValues {
@@ -18,6 +32,10 @@ export interface PersonValues {
   readonly password: string;
   readonly pin: string;
   readonly removePin: boolean;
+  readonly everyAlloy: boolean;
+  readonly alloyIds: string[];
+  readonly everyPart: boolean;
+  readonly parts: PartChoice[];
 }
 
 /** The form of a new person. */
@@ -30,16 +48,37 @@ export const emptyPerson: PersonValues = {
   password: '',
   pin: '',
   removePin: false,
+  everyAlloy: true,
+  alloyIds: [],
+  everyPart: true,
+  parts: [...partChoices],
 };
 
 /** The form of a person as they are; password and PIN are never sent back, so they begin empty. */
-export const valuesOf = ({ name, login, email, roles, active }: Person): PersonValues => ({
+export const valuesOf = ({
+  name,
+  login,
+  email,
+  roles,
+  active,
+  apprenticeship: { alloyIds, parts },
+}: Person): PersonValues => ({
   ...emptyPerson,
   name,
   login,
   email: email ?? '',
   roles: [...roles],
   active,
+  everyAlloy: alloyIds === null,
+  alloyIds: [...(alloyIds ?? [])],
+  everyPart: parts === null,
+  parts: partChoices.filter((part) => parts === null || partsOf[part].every((each) => parts.includes(each))),
+});
+
+/** Everyone who opens a card does its guard. */
+const toApprenticeship = ({ everyAlloy, alloyIds, everyPart, parts }: PersonValues): Apprenticeship => ({
+  alloyIds: everyAlloy ? null : alloyIds,
+  parts: everyPart ? null : ['guard', ...parts.flatMap((part) => partsOf[part])],
 });
 
 const toCreate = ({ name, login, email, roles, password, pin }: PersonValues): CreatePersonRequest => ({
@@ -59,6 +98,8 @@ const toUpdate = (values: PersonValues): UpdatePersonRequest => {
     email,
     roles,
     active,
+    // The contract's arrays are mutable where the domain's are not.
+    ...(workerRoleOf(roles) === 'apprentice' ? { apprenticeship: toApprenticeship(values) as never } : {}),
     ...(password === '' ? {} : { password }),
     ...(removePin ? { pin: null } : pin === '' ? {} : { pin }),
   };

@@ -21,7 +21,7 @@ export const CastingMoves = ({ casting }: { readonly casting: Casting }) => {
   return (
     <section aria-labelledby="moves" className="screen-only grid gap-3">
       <h3 id="moves" className="font-black">
-        Take it on
+        {casting.state === 'held' ? 'Let it go on, or scrap it' : 'Take it on'}
       </h3>
       <FormProblem sentence={move.error ? sentenceOf(move.error) : undefined} />
       <p className="flex flex-wrap gap-2.5">

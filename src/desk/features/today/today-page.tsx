@@ -9,6 +9,7 @@ import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { DayBoard } from './day-board.tsx';
 import { DayPicker } from './day-picker.tsx';
 import { daySentence } from './day-sentence.ts';
+import { StoppedNotice } from './stopped-notice.tsx';
 import { useDay } from './use-day.ts';
 
 const localDay = z.iso.date();
@@ -59,13 +60,16 @@ export const TodayPage = () => {
         }
       />
       <Loaded query={day} what="the day’s castings">
-        {(data) =>
-          data.castings.length === 0 ? (
-            <NoCastings isToday={on === today} />
-          ) : (
-            <DayBoard day={data} on={on} nowMs={nowMs} />
-          )
-        }
+        {(data) => (
+          <>
+            {on === today ? <StoppedNotice melts={data.stopped} /> : null}
+            {data.castings.length === 0 ? (
+              <NoCastings isToday={on === today} />
+            ) : (
+              <DayBoard day={data} on={on} nowMs={nowMs} />
+            )}
+          </>
+        )}
       </Loaded>
     </>
   );

@@ -13,6 +13,8 @@ export interface Day {
   readonly melts: ReadonlyMap<string, MeltSummary>;
   /** Castings whose card is open at a terminal. */
   readonly runningIds: ReadonlySet<string>;
+  /** Melts on which work is stopped now, of whatever day. */
+  readonly stopped: readonly MeltSummary[];
 }
 
 const dayOf = (castings: readonly Casting[], melts: readonly MeltSummary[]): Day => {
@@ -25,6 +27,7 @@ const dayOf = (castings: readonly Casting[], melts: readonly MeltSummary[]): Day
     castings,
     melts: new Map(pairs),
     runningIds: new Set(pairs.filter(([, melt]) => isRunning(melt)).map(([id]) => id)),
+    stopped: melts.filter(({ stop }) => stop !== null),
   };
 };
 
