@@ -1,6 +1,5 @@
 import { render, screen } from '@testing-library/react';
 import { userEvent } from '@testing-library/user-event';
-import type { ColumnDef } from '@tanstack/react-table';
 import { MemoryRouter } from 'react-router-dom';
 import { describe, expect, it, vi } from 'vitest';
 import { DataTable, type DataTableProps } from './data-table.tsx';
@@ -10,7 +9,7 @@ interface Melt {
   readonly metalG: number;
 }
 
-const columns: readonly ColumnDef<Melt, string & number>[] = [
+const columns: DataTableProps<Melt>['columns'] = [
   { accessorKey: 'id', header: 'Melt' },
   { accessorKey: 'metalG', header: 'Metal, g', meta: { align: 'right' } },
   { id: 'note', header: 'Note', cell: () => '', enableSorting: false },

@@ -43,6 +43,7 @@ const presenceOf = ({ role }: PreviewWork): Presence => ({
     units: { temperature: 'C', mass: 'g' },
     idleLockS: 0,
     timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone,
+    marksPlace: 'ISO 9202',
   },
   signOut: () => undefined,
 });
