@@ -17,7 +17,9 @@ export const Alarms = () => {
   const clocks = useRememberedClocks();
   const nowMs = useServerNow(250);
   const lookedMs = useRef(nowMs);
-  const [warning, setWarning] = useState<ClockWarning | null>(null);
+  const [warning, setWarning] = useState<{ readonly due: ClockWarning; readonly seenMs: number } | null>(
+    null,
+  );
   useWakeLock(clocks.length > 0);
   useEffect(() => wakeSignalsByTouch(), []);
   useEffect(() => {
@@ -25,20 +27,20 @@ export const Alarms = () => {
     lookedMs.current = nowMs;
     if (!due) return;
     playSignal(due.signal);
-    setWarning(due);
+    setWarning({ due, seenMs: nowMs });
   }, [clocks, nowMs]);
-  const isShown = warning !== null && nowMs - warning.atMs < standsMs;
+  const shown = warning && nowMs - warning.seenMs < standsMs ? warning.due : null;
   return (
     <div
       role="alert"
       className="pointer-events-none fixed inset-x-0 top-2 z-10 flex justify-center"
-      data-signal={isShown ? warning.signal : undefined}
+      data-signal={shown?.signal}
     >
-      {isShown ? (
+      {shown ? (
         <span className="rounded-full border-[4px] border-ink bg-ground px-8 py-3 text-ink">
           <StateMark
-            state={warning.signal === 'open' ? 'ready' : 'caution'}
-            text={warning.words}
+            state={shown.signal === 'open' ? 'ready' : 'caution'}
+            text={shown.words}
             size="terminal"
           />
         </span>

@@ -1,6 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
 import { useState } from 'react';
-import { isProblemError, ProblemError, sentenceOf } from '#src/lib/http.ts';
+import { isProblemError, ProblemError, sentenceOf, UnreachableError } from '#src/lib/http.ts';
 import { useNow } from '#src/lib/use-now.ts';
 
 /** The fewest digits of a PIN. */
@@ -10,6 +10,11 @@ const retryMomentOf = (error: unknown, atMs: number): number =>
   error instanceof ProblemError && error.problem.retryAfterS !== undefined
     ? atMs + error.problem.retryAfterS * 1000
     : 0;
+
+const wordsOf = (error: Error): string =>
+  error instanceof UnreachableError
+    ? 'No server, and it alone knows the PINs. Check the network, then try again.'
+    : sentenceOf(error);
 
 /** A PIN as it is typed, sent to be verified, and what came of it. */
 export interface PinAttempts {
@@ -43,7 +48,7 @@ export const usePinAttempts = (verify: (pin: string) => Promise<unknown>): PinAt
   const isOpen = waitS === 0 && !isLocked && !attempt.isPending;
   const isReady = pin.length >= fewestDigits;
   const isDelayed = isProblemError(attempt.error, 'sign-in-delayed');
-  const wrong = attempt.error && !isDelayed ? sentenceOf(attempt.error) : '';
+  const wrong = attempt.error && !isDelayed ? wordsOf(attempt.error) : '';
   return {
     pin,
     setPin,

@@ -7,7 +7,7 @@ export const WallClock = ({ nowMs, place }: { readonly nowMs: number; readonly p
     <div>
       <time
         dateTime={format(now, 'HH:mm')}
-        className="block text-[148px] leading-[0.86] font-black tracking-[-0.04em]"
+        className="block [zoom:calc(1/var(--zoom,1))] text-[148px] leading-[0.86] font-black tracking-[-0.04em]"
       >
         {format(now, 'HH:mm')}
       </time>

@@ -1,4 +1,4 @@
-import type { QueryClient } from '@tanstack/react-query';
+import { notifyManager, type QueryClient } from '@tanstack/react-query';
 import type { RecordEventRequest } from '#shared/contracts/card.ts';
 import { cardQuery, recordEvent } from '#src/api/cards.ts';
 import { sessionQuery } from '#src/api/session.ts';
@@ -22,6 +22,7 @@ export const deliverToServer = (client: QueryClient): Outbox => {
           : card,
       );
       void client.invalidateQueries({ queryKey: ['castings'] });
+      return new Promise((resolve) => notifyManager.schedule(() => resolve()));
     },
     onRefused: ({ castingId }) => {
       void client.invalidateQueries({ queryKey: cardQuery(castingId).queryKey });

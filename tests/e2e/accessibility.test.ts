@@ -2,7 +2,7 @@ import AxeBuilder from '@axe-core/playwright';
 import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
-import { guarded } from '#tests/factories/card-events.ts';
+import { checksBefore } from '#tests/factories/card-events.ts';
 import { cardAhead } from '#tests/support/card-ahead.ts';
 import { driveDesk } from '#tests/support/desk-driver.ts';
 import { serveStudio, type ServedStudio } from '#tests/support/served-studio.ts';
@@ -151,7 +151,10 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
     await terminal.openCard(card.castingId);
     await page.getByRole('group', { name: 'Cautions' }).waitFor();
     await look('guard');
-    expect((await card.deliver(guarded)).status()).toBe(201);
+    const deliverAll = async (events: readonly object[]): Promise<void> => {
+      for (const event of events) expect((await card.deliver(event)).status()).toBe(201);
+    };
+    await deliverAll([...checksBefore('guard', card.context), ...checksBefore('charge', card.context)]);
     await card.deliver({ type: 'charge-weighed', kind: 'grain', massG: card.plannedG });
     await page.reload();
     await terminal.button('Grain in').waitFor();
@@ -169,7 +172,7 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
     await terminal.button(/^Take/).click();
     await terminal.button(/Ready\. Hold/).waitFor();
     await look('melt');
-    await terminal.button(/: figures, theme, sign out/).click();
+    await terminal.button(/: figures, comfort, sign out/).click();
     await page.getByRole('dialog').waitFor();
     await look('figures of the card');
     await page.keyboard.press('Escape');
@@ -184,7 +187,13 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
       [{ type: 'poured' }, 'Quenched already'],
     ] as const;
     for (const [event, button] of steps) {
-      await card.deliver(event);
+      await deliverAll([event]);
+      if (event.type === 'melt-ready') {
+        await page.reload();
+        await page.getByRole('group', { name: 'Cautions' }).waitFor();
+        await look('words before flask out');
+        await deliverAll(checksBefore('flask-out', card.context));
+      }
       await page.reload();
       await terminal.button(button).waitFor();
       await look(`after ${event.type}`);
@@ -193,8 +202,20 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
     await page.reload();
     await page.getByRole('group', { name: 'What the pad types' }).waitFor();
     await look('close');
-    await card.deliver({ type: 'closed', buttonMassG: 10, lossMassG: 0.1, look: 'full', note: '' });
+    await deliverAll([{ type: 'closed', buttonMassG: 10, lossMassG: 3, look: 'full', note: '' }]);
     await page.reload();
+    await page.getByRole('group', { name: 'Reason' }).waitFor();
+    await look('departure');
+    await terminal.giveReason('A slip', 'A bead rolled under the bench.');
+    while (await terminal.button('Keep this reason').count()) {
+      await terminal.button('Keep this reason').click();
+      await page.getByRole('group', { name: 'Reason' }).waitFor();
+      await terminal.giveReason('A slip', 'A bead rolled under the bench.');
+    }
+    await terminal.button('Next: a second person signs').click();
+    await page.getByRole('list', { name: 'People' }).waitFor();
+    await look('second person');
+    await terminal.signAs('tomas', 'Look, then sign');
     await terminal.heading(/Done\./).waitFor();
     await look('after the close');
     expect(faults).toEqual([]);
@@ -209,8 +230,9 @@ it.each(['g', 'dwt', 'ozt'] as const)(
     const flask = { g: 122, dwt: 161, ozt: 170 }[massUnit];
     await models.Casting.update({ state: 'holding' }, { where: { state: ['dewaxed', 'invested'] } });
     const terminal = await signedIn('ines');
-    const { castingId } = await cardAhead(terminal.page, studio, flask, 'charge');
-    await terminal.openCard(castingId);
+    const card = await cardAhead(terminal.page, studio, flask, 'charge');
+    for (const event of checksBefore('charge', card.context)) await card.deliver(event);
+    await terminal.openCard(card.castingId);
     await terminal.button('Grain in').waitFor();
     await settle(terminal.page);
     // The words' column holds the number; the crucible's labels stay within its picture.

@@ -77,6 +77,7 @@ const walkCard = async (terminal: TerminalDriver, job: Job) => {
   expect(await wordsOn(page.locator('body'))).toMatch(job.alloy);
   await terminal.hold('Hold to open the card');
   await terminal.guard();
+  await terminal.readOn();
 
   // A decimal comma is read as it is meant.
   await terminal.weighIn('Returns', returnsG.toFixed(2).replace('.', ','));
@@ -90,6 +91,7 @@ const walkCard = async (terminal: TerminalDriver, job: Job) => {
   // The terminal crashes here; it comes back to the same step with nothing lost.
   await page.reload();
   await terminal.hold(/Ready\. Hold/);
+  await terminal.readOn();
   await terminal.hold('Flask is out. Hold');
   await terminal.heading(/Pour now/).waitFor();
   await terminal.hold(/^Poured/);

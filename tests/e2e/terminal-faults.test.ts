@@ -34,6 +34,10 @@ const signedIn = async (login: string): Promise<TerminalDriver> => {
   return terminal;
 };
 
+/** Whether nothing waits for delivery at a terminal. */
+const isIdle = async ({ page }: TerminalDriver): Promise<boolean> =>
+  (await page.getByText(/records? waits?/).count()) === 0;
+
 /** What the melt book holds of the metal put in on one melt, g. */
 const weighings = async (meltId: string): Promise<readonly number[]> => {
   const events = await studio.services.models.MeltEvent.findAll({ where: { meltId }, order: ['seq'] });
@@ -51,7 +55,9 @@ describe('a terminal in trouble', () => {
     const context = terminal.page.context();
     const { castingId, meltId } = await cardAhead(terminal.page, studio, 147, 'charge');
     await terminal.openCard(castingId);
+    await terminal.readOn();
     await terminal.button('Grain in').waitFor();
+    await waitFor('the reading in the melt book', () => isIdle(terminal));
     await studio.suspend();
     try {
       await terminal.weighIn('Grain', '31.4');
@@ -79,6 +85,8 @@ describe('a terminal in trouble', () => {
     const { page } = terminal;
     const { castingId, meltId } = await cardAhead(page, studio, 122, 'charge');
     await terminal.openCard(castingId);
+    await terminal.readOn();
+    await waitFor('the reading in the melt book', () => isIdle(terminal));
     let sent = 0;
     await page.route('**/api/melts/*/events', async (route) => {
       sent += 1;

@@ -114,6 +114,7 @@ describe('what a terminal refuses', () => {
     const { page } = terminal;
     const card = await cardAhead(page, studio, 122, 'charge');
     await terminal.openCard(card.castingId);
+    await terminal.readOn();
     await terminal.button('Grain in').click();
     await terminal.heading(/How much/).waitFor();
     for (const [typed, sentence] of [
@@ -141,6 +142,7 @@ describe('what a terminal refuses', () => {
     const { page } = terminal;
     const { castingId, meltId, deliver } = await cardAhead(page, studio, 150, 'melt');
     await terminal.openCard(castingId);
+    await terminal.readOn();
     await terminal.read('1150');
     await page.getByText(/over the pour window\. Is that right\?/).waitFor();
     const blocked = terminal.button('A caster or the owner has to confirm this');

@@ -1,8 +1,55 @@
-import type { Browser } from 'playwright-core';
+import type { Browser, Page } from 'playwright-core';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
+import { everyKindInstruction } from '#tests/factories/every-kind.ts';
+import { openPreview } from '#tests/support/open-preview.ts';
 import type { ServedStudio } from '#tests/support/served-studio.ts';
 import { demoPerson, driveTerminal } from '#tests/support/terminal-driver.ts';
 import { sizes, type Capture } from './capture.ts';
+
+/** The screens of single steps, walked in the desk's preview, which records nothing. */
+const capturePreview = async (
+  desk: Page,
+  shootInto: (page: Page) => (name: string) => Promise<void>,
+): Promise<void> => {
+  const page = await openPreview(desk, everyKindInstruction);
+  const shoot = shootInto(page);
+  const walk = driveTerminal(page, new URL(desk.url()).origin);
+  await walk.guard();
+  await walk.readOn();
+  await walk.weighIn('Grain', '84');
+  await walk.hold(/Complete\. Hold/);
+  await walk.heading(/How much flux/).waitFor();
+  await walk.type('1.7');
+  await shoot('30-step-weigh');
+  await walk.button(/^Keep 1\.70/).click();
+  await walk.heading(/flask furnace/).waitFor();
+  await walk.type('700');
+  await walk.button(/^Take/).click();
+  await walk.button('Yes, it is right').waitFor();
+  await shoot('31-step-read');
+  await walk.button('Yes, it is right').click();
+  await walk.heading(/cover gas fill/).waitFor();
+  await shoot('32-step-wait');
+  await walk.button('Practice: let it pass').click();
+  await walk.hold('Hold to go on');
+  await walk.heading(/picture of the crucible/).waitFor();
+  await shoot('33-step-photograph');
+  await walk.button('Skip this step').click();
+  await shoot('33a-skip');
+  await walk.hold('Hold to skip it');
+  await walk.heading(/code of the flask/).waitFor();
+  await shoot('34-step-scan');
+  await walk.button('Practice: take it as shown').click();
+  await walk.button('Cracked').click();
+  await shoot('35-step-choose');
+  await walk.button(/^Take/).click();
+  await walk.heading(/second person looks/).waitFor();
+  await shoot('36-step-countersign');
+  await walk.button(/Another caster/).click();
+  await walk.heading(/Open the cover gas/).waitFor();
+  await shoot('37-step-hold');
+  await page.close();
+};
 
 /** The terminal's screens, met in the order a caster meets them on one card. */
 export const captureTerminal = async (
@@ -27,6 +74,22 @@ export const captureTerminal = async (
   await terminal.signIn('ines');
   await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
   await shoot('04-standby');
+  await terminal.button('Comfort').click();
+  await page.getByRole('dialog').waitFor();
+  await shoot('04a-comfort');
+  await terminal.button('Left').click();
+  await terminal.button('Large').click();
+  await terminal.button('Done').click();
+  await shoot('04b-standby-large-left');
+  await terminal.button('Comfort').click();
+  await terminal.button('Right').click();
+  await terminal.button('Normal').click();
+  await terminal.button('Done').click();
+  await page.getByRole('link', { name: 'Practise a card' }).click();
+  await page.getByRole('group', { name: 'Cautions' }).waitFor();
+  await shoot('04c-practice');
+  await page.goto(`${studio.origin}/kiosk`);
+  await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
   await terminal.scanWithWedge('https://example.org/menu');
   await terminal.heading(/not one of our flask codes/).waitFor();
   await shoot('05-refused-code');
@@ -39,6 +102,9 @@ export const captureTerminal = async (
   await page.getByRole('group', { name: 'Cautions' }).waitFor();
   await shoot('07-guard');
   await terminal.guard();
+  await page.getByText('Read this').waitFor();
+  await shoot('07a-words');
+  await terminal.readOn();
   await terminal.weighIn('Returns', '32');
   await page.getByRole('button', { name: 'Grain in' }).waitFor();
   await shoot('08-charge');
@@ -70,14 +136,49 @@ export const captureTerminal = async (
   await shoot('15-stopped');
   await terminal.hold(/Hold to resume/);
   await terminal.hold(/Ready\. Hold/);
+  await terminal.readOn();
   await page.getByRole('button', { name: /Flask is out/ }).waitFor();
   await shoot('16-flask-out');
   await terminal.hold('Flask is out. Hold');
   await terminal.heading(/Pour now/).waitFor();
   await shoot('17-pour');
+  studio.advance(10 * 60);
+  await page.reload();
+  await page.getByText('Too late to pour').waitFor();
+  await shoot('17a-pour-late');
   await terminal.hold(/^Poured/);
   await page.getByText(/Wait until/).waitFor();
   await shoot('18-quench');
+  await terminal.button('Give 2 reasons').click();
+  await terminal.giveReason('Equipment failed');
+  await terminal.button('Keep this reason').click();
+  await terminal.heading(/^Poured/).waitFor();
+  await terminal.giveReason('Equipment failed', 'The tongs slipped at the furnace door.');
+  await terminal.button('Hold the pieces').click();
+  await shoot('18a-departure');
+  await terminal.button('Next: a second person signs').click();
+  await page.getByRole('list', { name: 'People' }).waitFor();
+  await shoot('18b-second-person');
+  await terminal.signAs('tomas', 'Look, then sign', '000000');
+  await page.getByRole('alert').getByText(/PIN/).waitFor();
+  await shoot('18c-wrong-pin');
+  await terminal.type(demoPerson('tomas').pin);
+  await terminal.button('Look, then sign').click();
+  await page.getByText(/Wait until/).waitFor();
+  await terminal.menu();
+  await shoot('18d-menu');
+  await terminal.button('Hand over').click();
+  await page.getByRole('list', { name: 'People' }).waitFor();
+  await shoot('18e-hand-over');
+  await terminal.button('Ines goes on').click();
+  await terminal.menu();
+  await terminal.button('Photograph').click();
+  await page
+    .getByText(/camera/i)
+    .first()
+    .waitFor();
+  await shoot('18f-photograph-no-camera');
+  await terminal.button('Back to the card').click();
   studio.advance(21 * 60);
   await page.reload();
   await page.getByRole('button', { name: 'Quenched. Hold' }).waitFor();
@@ -87,10 +188,18 @@ export const captureTerminal = async (
   await terminal.type('9.1');
   await shoot('20-close');
   await page.keyboard.press('Enter');
-  await terminal.type('0.2');
+  await terminal.type('1.2');
   await page.getByRole('group', { name: 'Look of the casting' }).getByRole('button').first().click();
   await terminal.hold('Hold to close the card');
+  await page.getByRole('button', { name: /Keep it\. Hold/ }).waitFor();
+  await shoot('20a-loss-questioned');
+  await terminal.hold(/Keep it\. Hold/);
+  await page.getByRole('group', { name: 'Reason' }).waitFor();
+  await terminal.giveReason('A slip', 'A bead rolled under the bench.');
+  await terminal.button('Next: a second person signs').click();
+  await terminal.signAs('tomas', 'Look, then sign');
   await terminal.heading(/Done\./).waitFor();
   await shoot('21-done');
+  await capturePreview(page, (shown) => (name) => capture(shown, name, sizes.terminal));
   await context.close();
 };

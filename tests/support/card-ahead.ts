@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { APIResponse, Page } from 'playwright-core';
 import type { PourCard } from '#shared/contracts/card.ts';
+import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
 import { eventsTo, type ReachableStep } from '#tests/factories/card-events.ts';
 import { askThrough } from './ask-through.ts';
@@ -11,6 +12,7 @@ export interface CardAhead {
   readonly castingId: string;
   readonly meltId: string;
   readonly plannedG: number;
+  readonly context: CardContext;
   readonly deliver: (event: object) => Promise<APIResponse>;
 }
 
@@ -38,5 +40,5 @@ export const cardAhead = async (
   const deliver = (event: object): Promise<APIResponse> =>
     ask.post(`/api/melts/${melt.id}/events`, { ...stamp(), event });
   for (const event of eventsTo(step, context)) await bodyOf(await deliver(event));
-  return { castingId, meltId: melt.id, plannedG: context.plannedMetalG, deliver };
+  return { castingId, meltId: melt.id, plannedG: context.plannedMetalG, context, deliver };
 };

@@ -66,6 +66,15 @@ export const driveTerminal = (page: Page, origin: string) => {
       await hold(button(/Guarded/));
     },
 
+    /** Reads and touches what the instruction asks before a part of the card, then holds. */
+    readOn: async (): Promise<void> => {
+      const cautions = page.getByRole('group', { name: 'Cautions' });
+      await cautions.waitFor();
+      for (const caution of await cautions.getByRole('button').all()) await caution.click();
+      await hold(button('Hold to go on'));
+      await cautions.waitFor({ state: 'detached' });
+    },
+
     /** Weighs in one kind of metal, as typed. */
     weighIn: async (kind: 'Returns' | 'Grain', typed: string): Promise<void> => {
       await button(`${kind} in`).click();
@@ -90,6 +99,30 @@ export const driveTerminal = (page: Page, origin: string) => {
       await type(loss);
       await page.getByRole('group', { name: 'Look of the casting' }).getByRole('button').first().click();
       await hold(button('Hold to close the card'));
+    },
+
+    /** Another person's tile and PIN on this terminal, and what then is pressed. */
+    signAs: async (login: string, verb: string, typed = demoPerson(login).pin): Promise<void> => {
+      const { name } = demoPerson(login);
+      await button(new RegExp(name)).click();
+      await page.getByRole('group', { name: `PIN of ${name}` }).waitFor();
+      await type(typed);
+      await button(verb).click();
+    },
+
+    /** Opens what is behind the name of whoever is signed in. */
+    menu: async (): Promise<void> => {
+      await button(/: figures, comfort, sign out/).click();
+      await page.getByRole('dialog').first().waitFor();
+    },
+
+    /** The reason of the departure shown, in words where given. */
+    giveReason: async (reason: string, words = ''): Promise<void> => {
+      await page.getByRole('group', { name: 'Reason' }).getByRole('button', { name: reason }).click();
+      if (words === '') return;
+      await button(/Add words/).click();
+      await page.getByRole('textbox').fill(words);
+      await button('Keep the words').click();
     },
 
     heading: (name: RegExp): Locator => page.getByRole('heading', { level: 1, name }),

@@ -5,6 +5,7 @@ import { timeOfDay } from '#src/lib/formats.ts';
 import { AlloyChip } from '#src/ui/alloy-chip.tsx';
 import { useServerNow } from '#kiosk/lib/server-clock.ts';
 import type { UnitWriter } from '#kiosk/lib/unit-writer.ts';
+import { PhotographBadge } from '#kiosk/outbox/photograph-badge.tsx';
 import { WaitingBadge } from '#kiosk/outbox/waiting-badge.tsx';
 
 /** The strip that names the flask: code, alloy, metal, method, time of day, and what waits for the server. */
@@ -31,6 +32,7 @@ export const CardTop = ({ card, write }: { readonly card: PourCard; readonly wri
         {timeOfDay(now)}
       </time>
       <WaitingBadge />
+      <PhotographBadge />
     </>
   );
 };

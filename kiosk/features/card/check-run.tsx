@@ -35,11 +35,18 @@ const Check = ({ step, isChecked, onToggle }: CheckProps) => (
   </button>
 );
 
-const Words = ({ sentence }: { readonly sentence: string }) => (
-  <p className="rounded-[22px] border-[3px] border-line bg-panel px-5 py-3 text-[24px] leading-tight font-extrabold">
+const Words = ({ sentence, isLarge }: { readonly sentence: string; readonly isLarge: boolean }) => (
+  <p
+    className={`rounded-[22px] border-[3px] border-line bg-panel font-extrabold text-pretty ${
+      isLarge ? 'px-7 py-6 text-[34px] leading-[1.2]' : 'px-5 py-3 text-[24px] leading-tight'
+    }`}
+  >
     {sentence}
   </p>
 );
+
+/** So many words alone have room for large letters. */
+const fewWords = 3;
 
 const isCheck = (step: InstructionStep): step is StepOf<'check'> => step.kind === 'check';
 
@@ -81,7 +88,7 @@ export const CheckRun = ({ running }: { readonly running: RunningCard }) => {
       }
       sub={card.instruction.deference}
       gauge={
-        <div role="group" aria-label="Cautions" className="grid content-center gap-4">
+        <div role="group" aria-label="Cautions" className="grid min-h-full content-center gap-4">
           {run.map((step) =>
             isCheck(step) ? (
               <Check
@@ -91,7 +98,11 @@ export const CheckRun = ({ running }: { readonly running: RunningCard }) => {
                 onToggle={() => toggle(step.key)}
               />
             ) : (
-              <Words key={step.key} sentence={step.sentence} />
+              <Words
+                key={step.key}
+                sentence={step.sentence}
+                isLarge={checks.length === 0 && run.length <= fewWords}
+              />
             ),
           )}
         </div>

@@ -95,7 +95,7 @@ const Lists = ({ castings, nowMs }: { readonly castings: readonly Casting[]; rea
   const here = toCome.filter(({ bay }) => bay === terminal.bay);
   const elsewhere = toCome.length - here.length;
   return (
-    <div className="grid gap-6">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-6">
       {running.length > 0 ? (
         <section aria-labelledby="running-heading">
           <h2 id="running-heading" className="text-[28px] font-black">
