@@ -16,3 +16,6 @@ export const driveDesk = (page: Page, origin: string) => ({
   },
   heading: (name: string | RegExp): Locator => page.getByRole('heading', { level: 1, name }),
 });
+
+/** The desk being driven. */
+export type DeskDriver = ReturnType<typeof driveDesk>;

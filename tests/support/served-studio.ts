@@ -1,5 +1,8 @@
+import { mkdtemp, rm } from 'node:fs/promises';
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { createApp } from '#server/app.ts';
 import { readEnvironment } from '#server/environment.ts';
@@ -36,10 +39,11 @@ const stop = (server: Server): Promise<void> =>
 /** Seeds the demo studio in a test's database and serves it. */
 export const serveStudio = async (database: TestDatabase): Promise<ServedStudio> => {
   let aheadMs = 0;
+  const dataDir = await mkdtemp(join(tmpdir(), 'ladlemark-files-'));
   const app = createApp({
     sequelize: database.sequelize,
     databaseUrl: database.url,
-    environment: readEnvironment({}),
+    environment: readEnvironment({ DATA_DIR: dataDir }),
     secrets: {
       sessionSecret: 'a secret of the tests, long enough',
       pinPepper: 'a pepper of the tests, long enough',
@@ -69,6 +73,7 @@ export const serveStudio = async (database: TestDatabase): Promise<ServedStudio>
     close: async () => {
       await stop(server);
       await app.close();
+      await rm(dataDir, { recursive: true });
     },
   };
 };

@@ -143,12 +143,13 @@ export const StepFields = ({ step, faults, onChange, onTakeToPart }: StepFieldsP
   <div className="grid gap-4 border-t-2 border-line px-4 py-4">
     <TextField
       label="Sentence"
+      autoFocus={step.sentence === ''}
       maxLength={200}
       value={step.sentence}
       error={faults.get('sentence')}
       onChange={({ currentTarget }) => onChange({ sentence: currentTarget.value })}
     />
-    <div className="grid gap-4 sm:grid-cols-2">
+    <div className="grid items-end gap-4 sm:grid-cols-2">
       <SelectField
         label="Kind"
         hint={kindWords[step.kind].about}

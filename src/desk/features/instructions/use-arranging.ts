@@ -41,7 +41,7 @@ export const useArranging = (
     focusNext.current = null;
   }, [steps]);
 
-  const placed = (next: StepValues[], key: string, control: string): void => {
+  const placed = (next: StepValues[], key: string, control: string | null): void => {
     focusNext.current = control;
     const step = next.find((each) => each.key === key);
     if (step) setSaid(`Now step ${next.indexOf(step) + 1}, before ${cardStepNames[step.before]}.`);
@@ -55,7 +55,8 @@ export const useArranging = (
     add: (kind, before) => {
       const step = emptyStep(kind, before);
       setOpenKey(step.key);
-      placed(addStep(steps, step), step.key, `step-${step.key}`);
+      // Its sentence takes the focus by itself.
+      placed(addStep(steps, step), step.key, null);
     },
     change: (index, change) => {
       const step = steps[index];

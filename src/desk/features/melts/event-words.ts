@@ -66,7 +66,9 @@ export const eventWords = (
     case 'carried-on':
       return 'Card carried on here.';
     case 'guard-confirmed':
-      return `${event.prompts.length} safety points confirmed.`;
+      return event.prompts.length > 0
+        ? `${event.prompts.length} safety points confirmed.`
+        : 'Guard confirmed.';
     case 'checked':
       return `Checked: ${event.keys.map(sentenceOf).join(' ')}`;
     case 'step-done':
