@@ -85,6 +85,7 @@ const whoGetsIn: Readonly<Record<string, readonly Caller[]>> = {
   'POST /api/charge-plans': decidersAtDesk,
   'GET /api/charge-plans': [...decidersAtDesk, ...atTerminal],
   'GET /api/melts/:id/charge': [...decidersAtDesk, ...atTerminal],
+  'GET /api/metal/crucibles': decidersAtDesk,
   'POST /api/melts/:id/close-out': decidersAtDesk,
 };
 
