@@ -24,6 +24,12 @@ const refuseUntold = (rows: readonly ReadRow[], good: readonly ReadRow[], onlyGo
   }
 };
 
+/** Rows of the same sheet that an earlier delivery of its key took in. */
+const takenBefore = async ({ models }: Services, keys: readonly string[]): Promise<ReadonlySet<string>> => {
+  const movements = await models.MetalMovement.findAll({ where: { key: [...keys] }, attributes: ['key'] });
+  return new Set(movements.map(({ key }) => key));
+};
+
 /** Takes in the good rows of a sheet, all of them or none; the same sheet sent again takes in nothing. */
 export const takeIntake = (
   services: Services,
@@ -31,17 +37,24 @@ export const takeIntake = (
   { key, text, onlyGood, confirmed }: z.output<typeof takeIntakeRequest>,
 ): Promise<IntakeResult> =>
   services.sequelize.transaction(async () => {
-    const rows = await readIntake(services, text);
-    if (typeof rows === 'string') throw fieldError('text', rows);
-    const good = rows.filter(({ lot, questions }) => lot !== null && (confirmed || questions.length === 0));
+    const sheet = await readIntake(services, text);
+    if (typeof sheet === 'string') throw fieldError('text', sheet);
+    const rows = sheet.rows.map((row) => ({ ...row, key: keyOfRow(key, row.line) }));
+    const before = await takenBefore(
+      services,
+      rows.map((row) => row.key),
+    );
+    const good = rows.filter(
+      (row) => row.lot !== null && (confirmed || row.questions.length === 0 || before.has(row.key)),
+    );
     refuseUntold(rows, good, onlyGood);
     const codes: string[] = [];
-    for (const { lot, line } of good) {
+    for (const { lot, key: rowKey } of good) {
       if (!lot) continue;
       const { received, alloy: _alloy, ...values } = lot;
       const taken = await takeLotIn(services, actor, {
         ...values,
-        key: keyOfRow(key, line),
+        key: rowKey,
         receivedAt: received === '' ? services.now().toISOString() : `${received}T12:00:00Z`,
         quarantineReason: '',
         confirmed: true,

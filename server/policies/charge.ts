@@ -10,6 +10,6 @@ export const chargePolicy = {
   plan: { who: keepsMetal },
   save: { who: keepsMetal },
   read: { who: (actor: Actor) => keepsMetal(actor) || worksAtFurnace(actor) },
-  /** Metal left in a crucible whose card has ended. */
+  /** Metal in a crucible, and what is left there when its card has ended. */
   closeOut: { who: keepsMetal },
 } satisfies Record<string, Policy>;

@@ -2,6 +2,7 @@ import type {
   ChargeLine as ChargeLineContract,
   ChargeOutcome as ChargeOutcomeContract,
   ChargeProposal,
+  FilledCrucible as FilledCrucibleContract,
   RunningCharge as RunningChargeContract,
   SavedChargePlan,
 } from '#shared/contracts/charge.ts';
@@ -10,6 +11,7 @@ import { fromMilligrams } from '#shared/domain/metal/ledger.ts';
 import type { Actor } from '../policies/actor.ts';
 import { chargePolicy } from '../policies/charge.ts';
 import { can } from '../policies/policy.ts';
+import type { FilledCrucible } from '../queries/list-crucibles.ts';
 import type { LoadedChargePlan } from '../queries/load-charge-plan.ts';
 import type { RunningCharge } from '../queries/load-running-charge.ts';
 import type { ChargeOutcome } from '../queries/plan-charge.ts';
@@ -52,8 +54,23 @@ export const presentProposal = ({ castings, request, outcome }: Proposal): Charg
   alloyName: castings[0].alloyRevision.alloy.name,
   revision: castings[0].alloyRevision.number,
   wantedG: fromMilligrams(request.wantedMg),
+  markedMetal: request.markedMetal,
   markPpt: request.markPpt,
+  targetWt: request.targetWt,
+  toleranceWt: request.toleranceWt,
+  returnsLimit: request.returnsShare,
   outcome: presentOutcome(outcome),
+});
+
+/** Metal in a crucible. */
+export const presentCrucible = ({ melt, balanceMg, assay }: FilledCrucible): FilledCrucibleContract => ({
+  melt: { id: melt.id, code: melt.code },
+  alloy: { name: melt.alloyRevision.alloy.name, revisionId: melt.alloyRevisionId },
+  massG: fromMilligrams(balanceMg),
+  compositionWt: assay.compositionWt,
+  toleranceWt: assay.toleranceWt,
+  person: melt.opener.name,
+  endedAt: melt.overAt?.toISOString() ?? null,
 });
 
 /** A charge plan that was kept. */

@@ -1,5 +1,5 @@
 import { Op, QueryTypes } from 'sequelize';
-import type { CountedLot, LossRate, Reconciliation } from '#shared/contracts/reconciliation.ts';
+import type { CountedLot, LossRate, Reconciliation, UncountedLot } from '#shared/contracts/reconciliation.ts';
 import { reconcile, totalOfMonth, type Flow, type Reassay } from '#shared/domain/metal/reconcile.ts';
 import type { Lot } from '../models/lot.ts';
 import type { User } from '../models/user.ts';
@@ -45,7 +45,12 @@ const readReassays = ({ sequelize }: Services, replacements: object): Promise<Re
     { type: QueryTypes.SELECT, replacements: { ...replacements } },
   );
 
-const groups = { alloy: 'alloys.name', caster: 'users.name', terminal: 'terminals.name' } as const;
+const groups = {
+  alloy: 'alloys.name',
+  caster: 'users.name',
+  furnace: 'terminals.bay',
+  terminal: 'terminals.name',
+} as const;
 
 /** What melts that were closed out in the month lost; a correction of the month counts too. */
 const readLoss = (
@@ -85,6 +90,7 @@ const readCounts = async ({ models }: Services, { from, to }: Bounds): Promise<C
     order: [['id', 'ASC']],
   });
   return counts.map(({ lot, user, expectedMg, countedMg, explanation, countedAt }) => ({
+    id: (lot as Lot).id,
     code: (lot as Lot).code,
     name: (lot as Lot).name,
     expectedMg,
@@ -95,33 +101,38 @@ const readCounts = async ({ models }: Services, { from, to }: Bounds): Promise<C
   }));
 };
 
+const onHandMg = /* sql */ `sum(case when to_place in ('stock', 'returns', 'scrap') then mass_mg else -mass_mg end)`;
+
 /** Lots that had metal at the end of the month. */
-const readOnHand = ({ sequelize }: Services, replacements: object): Promise<{ code: string }[]> =>
-  sequelize.query<{ code: string }>(
+const readOnHand = ({ sequelize }: Services, replacements: object): Promise<UncountedLot[]> =>
+  sequelize.query<UncountedLot>(
     /* sql */ `
-      select lots.code from lots join metal_movements on metal_movements.lot_id = lots.id
+      select lots.id, lots.code, lots.name, ${onHandMg}::double precision as "expectedMg"
+      from lots join metal_movements on metal_movements.lot_id = lots.id
       where occurred_at < :to
-      group by lots.code, lots.number
-      having sum(case when to_place in ('stock', 'returns', 'scrap') then mass_mg else -mass_mg end) > 0
+      group by lots.id, lots.code, lots.name, lots.number
+      having ${onHandMg} > 0
       order by lots.number`,
     { type: QueryTypes.SELECT, replacements: { ...replacements } },
   );
 
-/** A local month's metal: balances by element, counts, and loss by alloy, caster and terminal. */
+/** A local month's metal: balances by element, counts, and loss by alloy, caster, furnace and terminal. */
 export const readReconciliation = async (services: Services, month: string): Promise<Reconciliation> => {
   const { timeZone } = await loadStudio(services);
   const bounds = boundsOfMonth(month, timeZone);
-  const [flows, reassays, counts, onHand, lossByAlloy, lossByCaster, lossByTerminal] = await Promise.all([
+  const [flows, reassays, counts, onHand, ...losses] = await Promise.all([
     readFlows(services, bounds),
     readReassays(services, bounds),
     readCounts(services, bounds),
     readOnHand(services, bounds),
     readLoss(services, bounds, 'alloy'),
     readLoss(services, bounds, 'caster'),
+    readLoss(services, bounds, 'furnace'),
     readLoss(services, bounds, 'terminal'),
   ]);
+  const [lossByAlloy, lossByCaster, lossByFurnace, lossByTerminal] = losses;
   const metals = reconcile(flows, reassays);
-  const counted = new Set(counts.map(({ code }) => code));
+  const counted = new Set(counts.map(({ id }) => id));
   return {
     month,
     from: bounds.from.toISOString(),
@@ -129,9 +140,10 @@ export const readReconciliation = async (services: Services, month: string): Pro
     metals,
     total: totalOfMonth(metals),
     counts,
-    uncounted: onHand.map(({ code }) => code).filter((code) => !counted.has(code)),
+    uncounted: onHand.filter(({ id }) => !counted.has(id)),
     lossByAlloy,
     lossByCaster,
+    lossByFurnace,
     lossByTerminal,
   };
 };

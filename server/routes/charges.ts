@@ -11,11 +11,13 @@ import { saveChargePlan } from '../commands/save-charge-plan.ts';
 import { chargePolicy } from '../policies/charge.ts';
 import {
   presentChargePlan,
+  presentCrucible,
   presentOutcome,
   presentProposal,
   presentRunningCharge,
 } from '../presenters/charge.ts';
 import { presentMelt } from '../presenters/melt.ts';
+import { listCrucibles } from '../queries/list-crucibles.ts';
 import { loadChargePlan } from '../queries/load-charge-plan.ts';
 import { loadMelt } from '../queries/load-melt.ts';
 import { loadRunningCharge } from '../queries/load-running-charge.ts';
@@ -72,6 +74,13 @@ const running = defineRoute({
     presentRunningCharge(await loadRunningCharge(services, await loadMelt(services, params.id))),
 });
 
+const crucibles = defineRoute({
+  method: 'get',
+  path: '/api/metal/crucibles',
+  policy: chargePolicy.closeOut,
+  act: async ({ services }) => (await listCrucibles(services)).map(presentCrucible),
+});
+
 const closeOut = defineRoute({
   method: 'post',
   path: '/api/melts/:id/close-out',
@@ -84,4 +93,4 @@ const closeOut = defineRoute({
   },
 });
 
-export const chargeRoutes = [propose, changePot, save, find, running, closeOut];
+export const chargeRoutes = [propose, changePot, save, find, running, crucibles, closeOut];

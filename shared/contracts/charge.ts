@@ -82,7 +82,13 @@ export interface ChargeProposal {
   readonly alloyName: string;
   readonly revision: number;
   readonly wantedG: number;
+  readonly markedMetal: 'Ag' | 'Au';
   readonly markPpt: number;
+  /** What the charge must come to, so that a plan changed by hand can be judged at once. */
+  readonly targetWt: Parts;
+  readonly toleranceWt: Parts;
+  /** The largest share of returns. */
+  readonly returnsLimit: number;
   readonly outcome: ChargeOutcome;
 }
 
@@ -110,6 +116,19 @@ export interface RunningCharge {
   readonly markPpt: number;
   /** What remains, corrected for what was really weighed. */
   readonly remainder: ChargeOutcome;
+}
+
+/** Metal that the ledger has in the crucible of a melt. */
+export interface FilledCrucible {
+  readonly melt: { readonly id: string; readonly code: string };
+  readonly alloy: { readonly name: string; readonly revisionId: string };
+  readonly massG: number;
+  readonly compositionWt: Parts;
+  readonly toleranceWt: Parts;
+  /** Who opened the melt. */
+  readonly person: string;
+  /** When its card ended; null while it is open at a terminal. */
+  readonly endedAt: string | null;
 }
 
 /** Empties the crucible of a melt whose card has ended with metal in it; what is neither button nor loss is in castings. */

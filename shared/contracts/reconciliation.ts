@@ -16,6 +16,7 @@ export interface LossRate {
 
 /** One lot as it was counted. */
 export interface CountedLot {
+  readonly id: string;
   readonly code: string;
   readonly name: string;
   readonly expectedMg: number;
@@ -23,6 +24,15 @@ export interface CountedLot {
   readonly explanation: string;
   readonly person: string;
   readonly at: string;
+}
+
+/** One lot that nobody counted. */
+export interface UncountedLot {
+  readonly id: string;
+  readonly code: string;
+  readonly name: string;
+  /** What the ledger says it held at the month's end. */
+  readonly expectedMg: number;
 }
 
 /** A month of metal: every element's balance to the milligram, what was counted, what melting lost. */
@@ -33,9 +43,11 @@ export interface Reconciliation {
   readonly metals: readonly MonthOfMetal[];
   readonly total: MonthOfMetal;
   readonly counts: readonly CountedLot[];
-  /** Codes of lots with metal on hand that nobody counted in the month. */
-  readonly uncounted: readonly string[];
+  /** Lots with metal on hand at the month's end that nobody counted in it. */
+  readonly uncounted: readonly UncountedLot[];
   readonly lossByAlloy: readonly LossRate[];
   readonly lossByCaster: readonly LossRate[];
+  /** By the bay of the furnace, as its terminal names it. */
+  readonly lossByFurnace: readonly LossRate[];
   readonly lossByTerminal: readonly LossRate[];
 }

@@ -10,6 +10,11 @@ export type TemperatureUnit = 'C' | 'F';
 /** The unit of mass a studio weighs in: gram, pennyweight or troy ounce. */
 export type MassUnit = 'g' | 'dwt' | 'ozt';
 
+/** Units in which a mass may be typed wherever the studio's own is not the one at hand. */
+export const typedMassUnits = ['g', 'kg', 'dwt', 'ozt'] as const;
+/** One of them. */
+export type TypedMassUnit = (typeof typedMassUnits)[number];
+
 /** The units a studio reads and weighs in. */
 export interface Units {
   readonly temperature: TemperatureUnit;
@@ -17,7 +22,12 @@ export interface Units {
 }
 
 /** Grams in one unit of mass; exact: 1 ozt = 31.1034768 g (international pound, 1959), 1 dwt = ozt / 20. */
-const gramsPer: Readonly<Record<MassUnit, number>> = { g: 1, dwt: 31.1034768 / 20, ozt: 31.1034768 };
+const gramsPer: Readonly<Record<TypedMassUnit, number>> = {
+  g: 1,
+  kg: 1000,
+  dwt: 31.1034768 / 20,
+  ozt: 31.1034768,
+};
 
 /** Converts a temperature as typed in `unit` to °C. */
 export const toCelsius = (value: number, unit: TemperatureUnit): Celsius =>
@@ -32,10 +42,10 @@ export const fromCelsiusDifference = (value: number, unit: TemperatureUnit): num
   unit === 'C' ? value : (value * 9) / 5;
 
 /** Converts a mass as typed in `unit` to grams. */
-export const toGrams = (value: number, unit: MassUnit): Grams => value * gramsPer[unit];
+export const toGrams = (value: number, unit: TypedMassUnit): Grams => value * gramsPer[unit];
 
 /** Converts grams to the studio's `unit`. */
-export const fromGrams = (value: Grams, unit: MassUnit): number => value / gramsPer[unit];
+export const fromGrams = (value: Grams, unit: TypedMassUnit): number => value / gramsPer[unit];
 
 const decimals: Readonly<Record<MassUnit, number>> = { g: 2, dwt: 2, ozt: 4 };
 

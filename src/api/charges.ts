@@ -1,10 +1,15 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
 import type {
+  ChangePotRequest,
+  ChargeOutcome,
   ChargeProposal,
+  CloseOutRequest,
+  FilledCrucible,
   PlanChargeRequest,
   SavedChargePlan,
   SavePlanRequest,
 } from '#shared/contracts/charge.ts';
+import type { Melt } from '#shared/contracts/melt.ts';
 import { http } from '#src/lib/http.ts';
 
 /** The charge plan kept for a casting, null where there is none. */
@@ -29,5 +34,27 @@ export const useSaveChargePlan = () => {
   return useMutation({
     mutationFn: (request: SavePlanRequest) => http.post<SavedChargePlan>('/api/charge-plans', request),
     onSuccess: () => client.invalidateQueries({ queryKey: ['charge-plans'] }),
+  });
+};
+
+/** Says what to add to a pot so that it becomes an alloy; nothing is kept. */
+export const useChangePot = () =>
+  useMutation({
+    mutationFn: (request: ChangePotRequest) => http.post<ChargeOutcome>('/api/charge-plans/pot', request),
+  });
+
+/** Every crucible that the ledger has metal in, the oldest melt first. */
+export const cruciblesQuery = queryOptions({
+  queryKey: ['metal', 'crucibles'],
+  queryFn: () => http.get<FilledCrucible[]>('/api/metal/crucibles'),
+});
+
+/** Empties the crucible of a melt whose card has ended with metal in it. */
+export const useCloseOut = (meltId: string) => {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (request: CloseOutRequest) => http.post<Melt>(`/api/melts/${meltId}/close-out`, request),
+    onSuccess: () =>
+      Promise.all([['lots'], ['metal'], ['melts']].map((queryKey) => client.invalidateQueries({ queryKey }))),
   });
 };

@@ -40,8 +40,8 @@ export const sentenceOf = (error: unknown): string =>
     : 'Something went wrong on this page. Load it again.';
 
 const giveUpAfterMs = 15_000;
-/** A scanned page takes longer than a line of words over a workshop's network. */
-const giveUpUploadAfterMs = 120_000;
+/** A scanned page, or a sheet of a thousand lots, takes longer than a line of words. */
+const giveUpLongAfterMs = 120_000;
 
 /** What a request carries, how it is written, and how long it may take. */
 interface Content {
@@ -52,15 +52,13 @@ interface Content {
 
 const nothing: Content = { timeoutMs: giveUpAfterMs };
 
-const asJson = (body: unknown): Content =>
-  body === undefined
-    ? nothing
-    : { type: 'application/json', body: JSON.stringify(body), timeoutMs: giveUpAfterMs };
+const asJson = (body: unknown, timeoutMs: number = giveUpAfterMs): Content =>
+  body === undefined ? nothing : { type: 'application/json', body: JSON.stringify(body), timeoutMs };
 
 const asFile = (file: Blob): Content => ({
   type: 'application/octet-stream',
   body: file,
-  timeoutMs: giveUpUploadAfterMs,
+  timeoutMs: giveUpLongAfterMs,
 });
 
 const send = async (method: string, path: string, { type, body, timeoutMs }: Content): Promise<Response> => {
@@ -114,6 +112,9 @@ export const http = {
   get: <Answer>(path: string): Promise<Answer> => request('GET', path, nothing),
   blob: requestBlob,
   post: <Answer>(path: string, body?: unknown): Promise<Answer> => request('POST', path, asJson(body)),
+  /** Sends what the server works on for long, such as a sheet of a thousand rows; two minutes at most. */
+  postLong: <Answer>(path: string, body: unknown): Promise<Answer> =>
+    request('POST', path, asJson(body, giveUpLongAfterMs)),
   patch: <Answer>(path: string, body: unknown): Promise<Answer> => request('PATCH', path, asJson(body)),
   /** Sends a file as it is, as the whole body; two minutes at most. */
   upload: <Answer>(path: string, file: Blob): Promise<Answer> => request('POST', path, asFile(file)),

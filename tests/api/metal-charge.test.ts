@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import type { Countersigned } from '#shared/domain/instruction/instruction-step.ts';
+import type { FilledCrucible } from '#shared/contracts/charge.ts';
 import type { LotDetail } from '#shared/contracts/lot.ts';
 import type { AlloyRevision } from '#server/models/alloy-revision.ts';
 import type { Lot } from '#server/models/lot.ts';
@@ -251,11 +252,19 @@ describe('closing a melt by lots', () => {
         .post(`/api/melts/${meltId}/close-out`)
         .send({ buttonG: 49.9, lossG: 0.1, note: 'Let freeze in the crucible.', ...body });
     expect(problemIdOf(await closeOut({}))).toBe('wrong-state');
+    const crucibles = async () =>
+      ((await owner.client.get('/api/metal/crucibles').expect(200)).body as FilledCrucible[]).filter(
+        ({ melt }) => melt.id === meltId,
+      );
+    expect(await crucibles()).toMatchObject([{ massG: 50, endedAt: null }]);
     await send(meltId, { type: 'abandoned', note: 'Torch ran dry.' }).expect(201);
+    const { compositionWt } = lot;
+    expect(await crucibles()).toMatchObject([{ massG: 50, compositionWt, endedAt: expect.any(String) }]);
     expect(problemIdOf(await closeOut({ buttonG: 51 }))).toBe('not-enough-metal');
     await closeOut({}).expect(200);
     expect(problemIdOf(await closeOut({}))).toBe('wrong-state');
     const button = await server.services.models.Lot.findOne({ where: { meltId }, rejectOnEmpty: true });
     expect(button).toMatchObject({ balanceMg: 49_900, contentsMg: { Ag: 46_232, Cu: 3668 } });
+    expect(await crucibles()).toEqual([]);
   });
 });

@@ -21,6 +21,11 @@ const sheet = (...rows: readonly string[]): string => [header, ...rows].join('\n
 
 const preview = async (text: string): Promise<IntakePreview> =>
   (await owner.client.post('/api/lot-intake/preview').send({ text }).expect(200)).body as IntakePreview;
+/** The faults of a sheet's first row, each after the name of its column. */
+const faultsOf = ({ columns, rows }: IntakePreview): readonly string[] =>
+  (rows[0]?.faults ?? []).map(({ column, message }) =>
+    column === null ? message : `${columns[column]}: ${message}`,
+  );
 const take = (text: string, options: object = {}) =>
   owner.client.post('/api/lot-intake').send({ key: randomUUID(), text, ...options });
 const lots = () => server.services.models.Lot.count();
@@ -54,26 +59,24 @@ describe('looking through a sheet', () => {
 
   it.each([
     ['mass: “abc” is not a number.', good('a', 'abc')],
-    ['mass: is missing.', good('a', '')],
+    ['mass: It is missing.', good('a', '')],
     ['mass: -5 g is not a mass a studio could have.', good('a', '-5')],
     ['kind: “grains” is none of fine, grain, master, returns, scrap.', good('a').replace('grain', 'grains')],
     ['unit: “oz” is none of g, kg, dwt, ozt.', good('a').replace(';g;', ';oz;')],
-    ['unit: is missing.', good('a').replace(';g;', ';;')],
-    ['name: is missing.', good('')],
+    ['unit: It is missing.', good('a').replace(';g;', ';;')],
+    ['name: It is missing.', good('')],
     ['The parts come to 99.00 wt%; they must come to 100 wt%.', good('a').replace('7,35', '6,35')],
     ['Ag ±: 9 is not between 0 and 5.', good('a').replace(';0,1', ';9')],
-    ['received: write the day as year-month-day.', good('a').replace('2026-11-20', '20.11.2026')],
-    ['received: write the day as year-month-day.', good('a').replace('2026-11-20', '2026-02-30')],
-    ['alloy: there is no approved alloy “Electrum”.', good('a').replace(';g;;', ';g;Electrum;')],
+    ['received: Write the day as year-month-day.', good('a').replace('2026-11-20', '20.11.2026')],
+    ['received: Write the day as year-month-day.', good('a').replace('2026-11-20', '2026-02-30')],
+    ['alloy: There is no approved alloy “Electrum”.', good('a').replace(';g;;', ';g;Electrum;')],
   ])('names the fault: %s', async (fault, row) => {
-    expect((await preview(sheet(row))).rows[0]?.faults).toEqual([fault]);
+    expect(faultsOf(await preview(sheet(row)))).toEqual([fault]);
   });
 
   it('tells a decimal comma that was read as a separator', async () => {
     const text = `${header.replaceAll(';', ',')}\n${good('a').replaceAll(';', ',')}`;
-    expect((await preview(text)).rows[0]?.faults[0]).toContain(
-      'a decimal comma may have been read as a separator',
-    );
+    expect(faultsOf(await preview(text))[0]).toContain('a decimal comma may have been read as a separator');
   });
 
   it.each([
@@ -117,9 +120,24 @@ describe('taking a sheet in', () => {
   });
 
   it('leaves rows with questions unless someone stands by them', async () => {
-    const text = sheet(good('a'), good('b', '0,5'));
+    const text = sheet(good('d'), good('e', '0,5'));
     expect(((await take(text, { onlyGood: true }).expect(201)).body as IntakeResult).left).toBe(1);
     expect(((await take(text, { confirmed: true }).expect(201)).body as IntakeResult).codes).toHaveLength(2);
+  });
+
+  it('asks about a lot that is in already and a row that stands twice, but not when the same delivery comes again', async () => {
+    const text = sheet(good('f'), good('g'), good('g'));
+    const first = await preview(text);
+    expect([first.good, first.questioned]).toEqual([2, 1]);
+    expect(first.rows[2]?.questions).toEqual([{ column: 0, message: 'It repeats line 3. Is it another?' }]);
+    const key = randomUUID();
+    const taken = (await take(text, { key, onlyGood: true }).expect(201)).body as IntakeResult;
+    expect((await take(text, { key, onlyGood: true }).expect(201)).body).toEqual(taken);
+    const again = await preview(text);
+    expect([again.good, again.questioned]).toEqual([0, 3]);
+    expect(again.rows[0]?.questions[0]?.message).toContain(`It looks like ${taken.codes[0]}`);
+    const mended = await preview(sheet(good('f'), good('h')));
+    expect([mended.good, mended.questioned]).toEqual([1, 1]);
   });
 
   it('takes a thousand rows with ten faults: the preview names the ten, and 990 come in', async () => {

@@ -142,14 +142,16 @@ describe('a month of metal', () => {
     expect(december.from).toBe('2026-12-01T00:00:00.000Z');
   });
 
-  it('lists what was counted and what was not, and the loss by alloy, caster and terminal', async () => {
+  it('lists what was counted and what was not, and the loss by alloy, caster, furnace and terminal', async () => {
     const month = await read('2026-12');
     expect(month.counts).toMatchObject([
       { expectedMg: 239_500, countedMg: 239_470, explanation: 'Grain under the balance.' },
     ]);
     expect(month.uncounted).toHaveLength(3);
+    expect(month.uncounted.map(({ expectedMg }) => expectedMg)).not.toContain(0);
     const rate = { melts: 1, metalInMg: 100_503, lostMg: 201 };
     expect(month.lossByCaster).toEqual([{ name: here.user.name, ...rate }]);
+    expect(month.lossByFurnace).toEqual([{ name: here.terminal.bay, ...rate }]);
     expect(month.lossByTerminal).toEqual([{ name: here.terminal.name, ...rate }]);
     expect(month.lossByAlloy).toMatchObject([rate]);
   });

@@ -98,6 +98,7 @@ const whoGetsIn: Readonly<Record<string, readonly Caller[]>> = {
   'POST /api/charge-plans': decidersAtDesk,
   'GET /api/charge-plans': [...decidersAtDesk, ...atTerminal],
   'GET /api/melts/:id/charge': [...decidersAtDesk, ...atTerminal],
+  'GET /api/metal/crucibles': decidersAtDesk,
   'POST /api/melts/:id/close-out': decidersAtDesk,
   'GET /api/instruments': [...decidersAtDesk, ...atTerminal],
   'POST /api/instruments': ownerAtDesk,

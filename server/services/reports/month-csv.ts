@@ -14,9 +14,10 @@ export const monthCsv = (month: Reconciliation): string =>
     ...asCells(monthRows(month)).map(([label, ...cells]) => [String(label).replace(/^[-+=] /, ''), ...cells]),
     [],
     ...asCells(countRows(month)),
-    ['Not counted', month.uncounted.join(' ')],
+    ['Not counted', month.uncounted.map(({ code }) => code).join(' ')],
     [],
     ...asCells(lossRows('alloy', month.lossByAlloy)),
     ...asCells(lossRows('caster', month.lossByCaster)),
+    ...asCells(lossRows('furnace', month.lossByFurnace)),
     ...asCells(lossRows('terminal', month.lossByTerminal)),
   ]);

@@ -88,10 +88,13 @@ export const monthPdf = (
     page.moveDown(1);
     table(page, monthRows(month), evenly(150, month.metals.length + 1, width));
     table(page, countRows(month), [70, 190, 75, 75, 75, width - 575, 90]);
-    page.text(writable(`Not counted: ${month.uncounted.join(', ') || 'none'}.`)).moveDown(1);
+    page
+      .text(writable(`Not counted: ${month.uncounted.map(({ code }) => code).join(', ') || 'none'}.`))
+      .moveDown(1);
     const rateWidths = evenly(200, 4, width);
     table(page, lossRows('alloy', month.lossByAlloy), rateWidths);
     table(page, lossRows('caster', month.lossByCaster), rateWidths);
+    table(page, lossRows('furnace', month.lossByFurnace), rateWidths);
     table(page, lossRows('terminal', month.lossByTerminal), rateWidths);
     signatures(page);
     page.end();

@@ -1,5 +1,5 @@
 import { parseDecimal } from '#shared/lib/decimal.ts';
-import { toGrams } from '#shared/lib/units.ts';
+import { toGrams, typedMassUnits } from '#shared/lib/units.ts';
 import { lotKindNames, lotKinds, type LotKind, type Parts } from './lot.ts';
 
 /** The columns of an intake sheet beside one for each element (`Au`) and its tolerance (`Au ±`). */
@@ -65,22 +65,22 @@ export const readIntakeHeader = (cells: readonly string[]): IntakeHeader | strin
   return { columns, parts, tolerances: matching(toleranceShape) };
 };
 
-const unitGrams: Readonly<Record<string, (mass: number) => number>> = {
-  g: (mass) => mass,
-  kg: (mass) => mass * 1000,
-  dwt: (mass) => toGrams(mass, 'dwt'),
-  ozt: (mass) => toGrams(mass, 'ozt'),
-};
-
 const kindOf = (text: string): LotKind | null =>
   lotKinds.find((kind) => kind === text.toLowerCase() || lotKindNames[kind] === text.toLowerCase()) ?? null;
 
 const isDay = (text: string): boolean =>
   /^2\d{3}-\d\d-\d\d$/.test(text) && new Date(`${text}T00:00:00Z`).toISOString().startsWith(text);
 
+/** What is wrong with a cell, or with the row as a whole. */
+export interface IntakeFault {
+  /** Which of the sheet's columns, counted from nought; null for the row as a whole. */
+  readonly column: number | null;
+  readonly message: string;
+}
+
 /** Collects the faults of one row while its cells are read. */
 class Row {
-  readonly faults: string[] = [];
+  readonly faults: IntakeFault[] = [];
   private readonly cells: readonly string[];
   private readonly header: IntakeHeader;
 
@@ -92,76 +92,83 @@ class Row {
   text(column: IntakeColumn, most = 120): string {
     const index = this.header.columns[column];
     const text = index === undefined ? '' : (this.cells[index] ?? '').trim();
-    if (text.length > most) this.faults.push(`${column}: keep it under ${most} characters.`);
+    if (text.length > most) this.refuse(index, `Keep it under ${most} characters.`);
     return text;
   }
 
-  number(label: string, text: string): number {
+  refuse(column: IntakeColumn | number | undefined, message: string): void {
+    const index = typeof column === 'string' ? this.header.columns[column] : column;
+    this.faults.push({ column: index ?? null, message });
+  }
+
+  number(column: number | undefined, text: string): number {
     const parsed = parseDecimal(text);
     if (parsed.ok) return parsed.value;
-    this.faults.push(`${label}: ${text === '' ? 'is missing.' : `“${text}” is not a number.`}`);
+    this.refuse(column, text === '' ? 'It is missing.' : `“${text}” is not a number.`);
     return Number.NaN;
   }
 
-  numbers(columns: IntakeHeader['parts'], sign: string, most: number): Parts {
+  numbers(columns: IntakeHeader['parts'], most: number): Parts {
     return Object.fromEntries(
       columns.flatMap(([element, index]) => {
         const text = (this.cells[index] ?? '').trim();
         if (text === '') return [];
-        const value = this.number(`${element}${sign}`, text);
-        if (value < 0 || value > most)
-          this.faults.push(`${element}${sign}: ${value} is not between 0 and ${most}.`);
-        return value === 0 && sign === '' ? [] : [[element, value] as const];
+        const value = this.number(index, text);
+        if (value < 0 || value > most) this.refuse(index, `${value} is not between 0 and ${most}.`);
+        return [[element, value] as const];
       }),
     );
   }
+
+  massG(): number {
+    const mass = this.number(this.header.columns.mass, this.text('mass'));
+    const text = this.text('unit').toLowerCase().replaceAll(' ', '');
+    const unit = typedMassUnits.find((each) => each === text);
+    if (!unit) {
+      this.refuse(
+        'unit',
+        text === '' ? 'It is missing.' : `“${text}” is none of ${typedMassUnits.join(', ')}.`,
+      );
+      return Number.NaN;
+    }
+    const massG = Math.round(toGrams(mass, unit) * 1000) / 1000;
+    if (massG <= 0 || massG > 100_000) this.refuse('mass', `${massG} g is not a mass a studio could have.`);
+    return massG;
+  }
 }
 
-const massOf = (row: Row): number => {
-  const mass = row.number('mass', row.text('mass'));
-  const unit = row.text('unit').toLowerCase().replaceAll(' ', '');
-  const convert = unitGrams[unit];
-  if (!convert) {
-    row.faults.push(unit === '' ? 'unit: is missing.' : `unit: “${unit}” is none of g, kg, dwt, ozt.`);
-    return Number.NaN;
-  }
-  const massG = Math.round(convert(mass) * 1000) / 1000;
-  if (massG <= 0 || massG > 100_000) row.faults.push(`mass: ${massG} g is not a mass a studio could have.`);
-  return massG;
-};
+const withoutNought = (parts: Parts): Parts =>
+  Object.fromEntries(Object.entries(parts).filter(([, wt]) => wt !== 0));
 
-/** Reads one row of an intake sheet: the lot it tells of, or every fault it has, one sentence each. */
+/** Reads one row of an intake sheet: the lot it tells of, or every fault it has at its cell, one sentence each. */
 export const judgeIntakeRow = (
   cells: readonly string[],
   header: IntakeHeader,
   width: number,
-): { readonly lot: IntakeLot } | { readonly faults: readonly string[] } => {
+): { readonly lot: IntakeLot } | { readonly faults: readonly IntakeFault[] } => {
   if (cells.length !== width) {
-    return {
-      faults: [
-        `The row has ${cells.length} cells, the first line ${width}: a decimal comma may have been read as a separator.`,
-      ],
-    };
+    const message = `The row has ${cells.length} cells, the first line ${width}: a decimal comma may have been read as a separator.`;
+    return { faults: [{ column: null, message }] };
   }
   const row = new Row(cells, header);
   const name = row.text('name', 80);
-  if (name === '') row.faults.push('name: is missing.');
+  if (name === '') row.refuse('name', 'It is missing.');
   const kindText = row.text('kind');
   const kind = kindOf(kindText);
-  if (!kind) row.faults.push(`kind: “${kindText}” is none of ${lotKinds.join(', ')}.`);
+  if (!kind) row.refuse('kind', `“${kindText}” is none of ${lotKinds.join(', ')}.`);
   const received = row.text('received');
-  if (received !== '' && !isDay(received)) row.faults.push('received: write the day as year-month-day.');
+  if (received !== '' && !isDay(received)) row.refuse('received', 'Write the day as year-month-day.');
   const lot = {
     name,
     kind: kind ?? 'scrap',
-    massG: massOf(row),
+    massG: row.massG(),
     alloy: row.text('alloy'),
     supplier: row.text('supplier'),
     supplierReference: row.text('reference'),
     place: row.text('place', 80),
     received,
-    compositionWt: row.numbers(header.parts, '', 100),
-    toleranceWt: row.numbers(header.tolerances, ' ±', 5),
+    compositionWt: withoutNought(row.numbers(header.parts, 100)),
+    toleranceWt: row.numbers(header.tolerances, 5),
   };
   return row.faults.length > 0 ? { faults: row.faults } : { lot };
 };

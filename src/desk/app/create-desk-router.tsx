@@ -35,6 +35,18 @@ const pages: readonly RouteObject[] = [
     lazy: async () => ({ Component: (await import('../features/metal/receive-page.tsx')).ReceivePage }),
   },
   {
+    path: 'metal/intake',
+    lazy: async () => ({ Component: (await import('../features/metal/intake-page.tsx')).IntakePage }),
+  },
+  {
+    path: 'metal/pot',
+    lazy: async () => ({ Component: (await import('../features/metal/pot-page.tsx')).PotPage }),
+  },
+  {
+    path: 'metal/crucibles/:meltId',
+    lazy: async () => ({ Component: (await import('../features/metal/crucible-page.tsx')).CruciblePage }),
+  },
+  {
     path: 'metal/lots/:lotId',
     lazy: async () => ({ Component: (await import('../features/metal/lot-page.tsx')).LotPage }),
   },

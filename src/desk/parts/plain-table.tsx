@@ -7,11 +7,14 @@ export interface PlainTableProps {
   readonly rows: readonly { readonly key: string; readonly cells: readonly ReactNode[] }[];
   /** Columns of words are set to the left, of figures to the right. */
   readonly align?: 'left' | 'right';
+  /** Columns of figures in a table of words, counted from nought. */
+  readonly figures?: readonly number[];
 }
 
 /** A small table of figures; on a narrow screen it scrolls sideways by itself, by the keys too. */
-export const PlainTable = ({ caption, heads, rows, align = 'right' }: PlainTableProps) => {
-  const side = (column: number): string => (column > 0 && align === 'right' ? 'text-right' : 'text-left');
+export const PlainTable = ({ caption, heads, rows, align = 'right', figures = [] }: PlainTableProps) => {
+  const side = (column: number): string =>
+    (column > 0 && align === 'right') || figures.includes(column) ? 'text-right' : 'text-left';
   return (
     <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto rounded-md">
       <table className="w-full text-[15px]">

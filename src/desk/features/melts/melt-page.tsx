@@ -9,6 +9,7 @@ import { Button } from '#src/ui/button.tsx';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
+import { CrucibleNotice } from '#src/desk/parts/crucible-notice.tsx';
 import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { metalOf } from '#src/desk/parts/metal-of.ts';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
@@ -67,6 +68,7 @@ export const MeltPage = () => {
       {(melt) => (
         <>
           <MeltTitle melt={melt} />
+          <CrucibleNotice meltId={melt.id} />
           <MeltSections melt={melt} />
         </>
       )}

@@ -1,6 +1,8 @@
-import { get, useFormContext, type FieldError } from 'react-hook-form';
+import { get, useFormContext, useWatch, type FieldError } from 'react-hook-form';
 import { TextAreaField } from '#src/ui/text-area-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
+import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { massRemark } from './metal-mass.ts';
 
 const useField = (name: string) => {
   const { register, formState } = useFormContext();
@@ -15,17 +17,24 @@ export interface FieldNames {
   readonly hint?: string;
 }
 
-/** A mass in the studio's unit, in a form of its context. */
-export const MassField = ({ name, label, hint, unit }: FieldNames & { readonly unit: string }) => (
-  <TextField
-    label={label}
-    hint={hint}
-    unit={unit}
-    inputMode="decimal"
-    autoComplete="off"
-    {...useField(name)}
-  />
-);
+/** Props of {@link MassField}. */
+export interface MassFieldProps extends FieldNames {
+  /** What the ledger says, g: a figure that would come to it in another unit is asked about. */
+  readonly expectedG?: number;
+}
+
+/** A mass in the studio's unit or the one typed after it, in a form of its context. */
+export const MassField = ({ name, label, hint, expectedG }: MassFieldProps) => {
+  const { units } = useStudio();
+  const typed: unknown = useWatch({ name });
+  const remark = massRemark(typeof typed === 'string' ? typed : '', units.mass, expectedG);
+  return (
+    <div className="grid gap-1.5">
+      <TextField label={label} hint={hint} unit={units.mass} autoComplete="off" {...useField(name)} />
+      <output className="font-extrabold empty:hidden">{remark}</output>
+    </div>
+  );
+};
 
 /** A line of words, in a form of its context. */
 export const WordsField = ({ name, label, hint }: FieldNames) => (

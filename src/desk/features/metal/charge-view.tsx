@@ -6,19 +6,29 @@ import { DefinitionList } from '#src/ui/definition-list.tsx';
 import { FinenessScale } from '#src/ui/fineness-scale.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
+import { MarkWords } from '#src/desk/parts/mark-words.tsx';
 import { PlainTable } from '#src/desk/parts/plain-table.tsx';
+import { writeWeighable } from './metal-mass.ts';
 import { gapWords, shareWords, wouldDoSentence } from './charge-words.ts';
 
 type Planned = Extract<ChargeOutcome, { readonly kind: 'planned' }>;
 type Short = Extract<ChargeOutcome, { readonly kind: 'short' }>;
 
-const Lines = ({ caption, lines }: { readonly caption: string; readonly lines: readonly ChargeLine[] }) => {
-  const { mass } = useStudio();
+/** The lots of a charge with what to weigh of each. */
+export const ChargeLines = ({
+  caption,
+  lines,
+}: {
+  readonly caption: string;
+  readonly lines: readonly ChargeLine[];
+}) => {
+  const { units } = useStudio();
   return (
     <PlainTable
       caption={caption}
       align="left"
       heads={['Lot', 'Kind', 'Mass']}
+      figures={[2]}
       rows={lines.map(({ lotId, code, name, kind, massG }) => ({
         key: lotId,
         cells: [
@@ -29,17 +39,18 @@ const Lines = ({ caption, lines }: { readonly caption: string; readonly lines: r
             {code} {name}
           </Link>,
           lotKindNames[kind],
-          <span className="font-extrabold whitespace-nowrap">{mass(massG)}</span>,
+          <span className="font-extrabold whitespace-nowrap">{writeWeighable(massG, units.mass)}</span>,
         ],
       }))}
     />
   );
 };
 
-/** How far beyond mark and worst case the scale goes, parts per thousand. */
+/** How far a fineness scale goes beyond mark and worst case the scale goes, parts per thousand. */
 const marginPpt = 10;
 
-const scaleRange = (mark: number, worst: number) => ({
+/** The span of a scale that shows a mark and a worst case. */
+export const scaleRange = (mark: number, worst: number) => ({
   low: Math.max(0, Math.min(mark, worst) - marginPpt),
   high: Math.min(1000, Math.max(mark, worst) + marginPpt),
 });
@@ -58,7 +69,7 @@ export const PlannedCharge = ({
   return (
     <div className="grid gap-x-14 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,420px)]">
       <div className="grid content-start gap-6">
-        <Lines caption="Lots of the charge" lines={lines} />
+        <ChargeLines caption="Lots of the charge" lines={lines} />
         <DefinitionList
           items={[
             { term: 'Charge in all', value: mass(totalG), note: `${mass(wantedG)} wanted` },
@@ -91,6 +102,7 @@ export const PlannedCharge = ({
           range={scaleRange(markPpt, worstPpt)}
           format={formatFineness}
         />
+        <MarkWords metal={proposal.markedMetal} worstPpt={worstPpt} markPpt={markPpt} />
       </div>
     </div>
   );
@@ -98,8 +110,8 @@ export const PlannedCharge = ({
 
 /** What stands in the way of a charge, and what would do. */
 export const ShortCharge = ({ outcome }: { readonly outcome: Short }) => {
-  const { mass } = useStudio();
-  const remedy = wouldDoSentence(outcome, mass);
+  const { units } = useStudio();
+  const remedy = wouldDoSentence(outcome, (grams) => writeWeighable(grams, units.mass));
   return (
     <Notice kind="caution" title="The metal on hand makes no charge that holds every limit.">
       <ul className="grid gap-1">
@@ -117,7 +129,7 @@ export const KeptPlan = ({ plan }: { readonly plan: SavedChargePlan }) => {
   const { clock } = useStudio();
   return (
     <div className="grid max-w-3xl gap-3">
-      <Lines caption="Lots of the kept plan" lines={plan.lines} />
+      <ChargeLines caption="Lots of the kept plan" lines={plan.lines} />
       <p className="text-soft">
         {plan.person}, {clock.dayAndTime(plan.at)}. Fineness expected {formatFineness(plan.expectedPpt)}, at
         the worst {formatFineness(plan.worstPpt)}; share of returns {shareWords(plan.returnsShare)}.

@@ -45,7 +45,7 @@ const CountAct = ({ lot, onClose }: ActProps) => {
       send={count.mutateAsync}
       onClose={onClose}
     >
-      <MassField name="mass" label="On the balance" unit={units.mass} />
+      <MassField name="mass" label="On the balance" expectedG={lot.balanceG} />
       <ReasonField
         name="reason"
         label="Why it differs"
@@ -150,7 +150,7 @@ const DispatchAct = ({ lot, onClose }: ActProps) => {
       send={dispatch.mutateAsync}
       onClose={onClose}
     >
-      <MassField name="mass" label="Mass sent" unit={units.mass} />
+      <MassField name="mass" label="Mass sent" expectedG={lot.balanceG} />
       <ReasonField name="reason" label="Where it goes" />
     </ActForm>
   );

@@ -32,7 +32,7 @@ const CorrectAct = ({ movement, onClose }: { readonly movement: Movement; readon
       send={correct.mutateAsync}
       onClose={onClose}
     >
-      <MassField name="mass" label="What it should have been" hint="0 undoes it." unit={units.mass} />
+      <MassField name="mass" label="What it should have been" hint="0 undoes it." />
       <ReasonField name="reason" label="What was wrong" />
       <CountersignFields hint="A second person signs, an owner or a caster." />
     </ActForm>

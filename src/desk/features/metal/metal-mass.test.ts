@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { readMass, writeExactGrams, writeExactMass } from './metal-mass.ts';
+import { readMass, writeExactGrams, writeExactMass, massRemark } from './metal-mass.ts';
 
 describe('writeExactMass', () => {
   it('tells masses a milligram apart in every unit', () => {
@@ -39,5 +39,27 @@ describe('readMass', () => {
   it('refuses what is no number', () => {
     expect(readMass('1.234,5', 'g').ok).toBe(false);
     expect(readMass('', 'g').ok).toBe(false);
+  });
+});
+
+describe('a mass with its unit after it', () => {
+  it.each([
+    ['1,5 ozt', 46.655],
+    ['3dwt', 4.666],
+    ['0.25 KG', 250],
+    ['12 g', 12],
+  ])('reads %s', (text, grams) => {
+    expect(readMass(text, 'g')).toEqual({ ok: true, value: grams });
+  });
+
+  it('refuses a unit it does not know, and an avoirdupois ounce with it', () => {
+    expect(readMass('3 oz', 'g').ok).toBe(false);
+  });
+
+  it('says what it comes to, or which unit may have been meant', () => {
+    expect(massRemark('1 ozt', 'g')).toBe('That is 31.103\u00a0g.');
+    expect(massRemark('12', 'g')).toBe('');
+    expect(massRemark('3.858', 'g', 120)).toContain('In ozt it would be what the ledger says.');
+    expect(massRemark('120', 'g', 120)).toBe('');
   });
 });

@@ -21,6 +21,7 @@ import { CastingChoice } from './casting-choice.tsx';
 import { KeptPlan, PlannedCharge, ShortCharge } from './charge-view.tsx';
 import { castingsToPlan } from './charge-words.ts';
 import { atFormPlaces, formSchema } from '#src/desk/parts/form-schema.ts';
+import { PlanEditor, type PlanLines } from './plan-editor.tsx';
 import { planReading, type PlanValues } from './plan-values.ts';
 
 type Request = z.output<typeof planChargeRequest>;
@@ -42,28 +43,42 @@ const Proposal = ({
   readonly lossShare: number;
 }) => {
   const save = useSaveChargePlan();
+  const [isByHand, setByHand] = useState(false);
   const { outcome, castingIds, alloyName, revision } = proposal;
   if (outcome.kind === 'short') return <ShortCharge outcome={outcome} />;
-  const keep = (): void =>
+  const keep = (lines: PlanLines): void =>
     save.mutate({
       castingIds: [...castingIds],
       lossShare,
-      lines: outcome.lines.map(({ lotId, massG }) => ({ lotId, massG })),
+      lines: lines.map(({ lotId, massG }) => ({ lotId, massG })),
     });
+  if (save.isSuccess)
+    return (
+      <Notice kind="info" title="The plan is kept.">
+        The card at the terminal asks for these lots; what is really weighed in corrects what remains.
+      </Notice>
+    );
   return (
     <Panel title={`${alloyName}, revision ${revision}`}>
-      <PlannedCharge proposal={proposal} outcome={outcome} />
       {save.error ? <Notice kind="error" title={sentenceOf(save.error)} /> : null}
-      {save.isSuccess ? (
-        <Notice kind="info" title="The plan is kept.">
-          The card at the terminal asks for these lots; what is really weighed in corrects what remains.
-        </Notice>
+      {isByHand ? (
+        <PlanEditor
+          proposal={proposal}
+          lines={outcome.lines}
+          isBusy={save.isPending}
+          onKeep={keep}
+          onBack={() => setByHand(false)}
+        />
       ) : (
-        <p>
-          <Button kind="main" busy={save.isPending} onClick={keep}>
-            Keep this plan
-          </Button>
-        </p>
+        <>
+          <PlannedCharge proposal={proposal} outcome={outcome} />
+          <p className="flex flex-wrap gap-4">
+            <Button kind="main" busy={save.isPending} onClick={() => keep(outcome.lines)}>
+              Keep this plan
+            </Button>
+            <Button onClick={() => setByHand(true)}>Change it by hand</Button>
+          </p>
+        </>
       )}
     </Panel>
   );

@@ -25,6 +25,7 @@ import { approvedRevision } from '#src/desk/parts/choose-revision.ts';
 import { CompositionFields } from '#src/desk/parts/composition-fields.tsx';
 import { capitalised } from '#src/desk/parts/element-names.ts';
 import { atFormPlaces, formSchema, rootOfParts } from '#src/desk/parts/form-schema.ts';
+import { MassField } from './act-fields.tsx';
 import { useActKey } from './use-act-key.ts';
 import { emptyReceive, receiveReading, type ReceiveValues } from './receive-values.ts';
 
@@ -91,21 +92,13 @@ const WhatItIs = () => {
   );
 };
 
-const WhereFrom = ({ unit }: { readonly unit: string }) => {
+const WhereFrom = () => {
   const { register, formState } = useFormContext<ReceiveValues>();
   const { errors } = formState;
   return (
     <>
       <div className="grid items-start gap-4 sm:grid-cols-2">
-        <TextField
-          label="Mass"
-          hint="As weighed here."
-          unit={unit}
-          inputMode="decimal"
-          autoComplete="off"
-          error={errors.mass?.message}
-          {...register('mass')}
-        />
+        <MassField name="mass" label="Mass" hint="As weighed here; g, kg, dwt or ozt may stand after it." />
         <TextField
           label="Received on"
           hint="The day it came."
@@ -174,7 +167,7 @@ export const ReceivePage = () => {
       <FormProvider {...form}>
         <form noValidate onSubmit={(event) => void submit(event)} className="grid max-w-[720px] gap-7">
           <WhatItIs />
-          <WhereFrom unit={units.mass} />
+          <WhereFrom />
           {isQuestioned ? (
             <CheckField
               label="I have looked at it again, and it is right"

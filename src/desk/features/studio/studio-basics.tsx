@@ -1,3 +1,4 @@
+import { markPlaces } from '#shared/domain/metal/fineness-marks.ts';
 import { SelectField } from '#src/ui/select-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
 import { faultAt, type FormPart } from './form-parts.ts';
@@ -14,7 +15,9 @@ const massUnits = [
   { value: 'ozt', label: 'troy ounces, ozt' },
 ];
 
-/** The studio's name, units, time zone and idle lock. */
+const marksPlaces = markPlaces.map((place) => ({ value: place, label: place }));
+
+/** The studio's name, units, marks, time zone and idle lock. */
 export const StudioBasics = ({ register, errors }: FormPart) => (
   <div className="grid max-w-3xl items-start gap-5 sm:grid-cols-2">
     <TextField
@@ -49,6 +52,13 @@ export const StudioBasics = ({ register, errors }: FormPart) => (
       options={massUnits}
       error={faultAt(errors, 'massUnit')}
       {...register('massUnit')}
+    />
+    <SelectField
+      label="Fineness marks are judged by"
+      hint="The local assay office has the last word."
+      options={marksPlaces}
+      error={faultAt(errors, 'marksPlace')}
+      {...register('marksPlace')}
     />
     <NumberField
       path="idleLockS"

@@ -16,6 +16,7 @@ const fields: readonly Path<StudioValues>[] = [
   'temperatureUnit',
   'massUnit',
   'timeZone',
+  'marksPlace',
   'idleLockS',
   'pyrometerCheckDays',
   'limits',

@@ -11,7 +11,7 @@ export const StudioPage = () => {
   return (
     <>
       <PageTitle
-        title="Studio"
+        title="Settings of the studio"
         summary="Pour cards are computed from these figures. Each carries its source, and every card shows it."
       />
       <Loaded query={studio} what="the settings">
