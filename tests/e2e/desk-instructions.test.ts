@@ -150,8 +150,11 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
           await document.fonts.ready;
           await Promise.allSettled(document.getAnimations().map((animation) => animation.finished));
         }, theme === 'melt room');
-        // The terminal's preview is looked at where it is made.
-        const { violations } = await new AxeBuilder({ page }).exclude('iframe').withTags(tags).analyze();
+        // The terminal's preview is looked at where it is made; the themes differ in nothing but colour.
+        const axe = new AxeBuilder({ page }).exclude('iframe');
+        const { violations } = await (
+          theme === 'day' ? axe.withTags(tags) : axe.withRules(['color-contrast'])
+        ).analyze();
         faults.push(
           ...violations.map(({ id, nodes }) => `${where}, ${theme}: ${id} at ${String(nodes[0]?.target)}`),
         );
