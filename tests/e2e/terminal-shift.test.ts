@@ -13,7 +13,7 @@ import { waitFor } from '#tests/support/wait-for.ts';
 
 let database: TestDatabase;
 let studio: ServedStudio;
-/** The camera sees a flask's code, which serves as a picture too. */
+/** The camera sees the code of a flask that is on hold, which serves as a picture too. */
 let floor: TerminalFloor;
 
 beforeAll(async () => {
@@ -23,7 +23,7 @@ beforeAll(async () => {
     { state: 'holding' },
     { where: { state: ['dewaxed', 'invested'] } },
   );
-  floor = await openTerminalFloor(studio, { fakeVideo: await makeQrVideo(buildFlaskCode(170)) });
+  floor = await openTerminalFloor(studio, { fakeVideo: await makeQrVideo(buildFlaskCode(88)) });
 });
 
 afterAll(async () => {

@@ -71,7 +71,7 @@ const Pin = ({ person, verify, verb, children, onBack }: PinProps) => {
   const attempts = usePinAttempts((pin) => verify(person, pin));
   const { isOpen, isReady, isLocked, words } = attempts;
   const gauge = (
-    <div className="grid content-center gap-4">
+    <div className="grid content-start gap-4 [&_[role=group]>div]:!grid-rows-[repeat(4,76px)]">
       <div role="alert" className="min-h-11">
         {words ? <StateMark state={attempts.state} text={words} size="desk" /> : null}
       </div>

@@ -45,13 +45,25 @@ const rowsOf = ({ figures, plannedMetalG }: CardContext, write: UnitWriter): rea
   ];
 };
 
+/** Props of {@link CardFiguresGrid}. */
+export interface CardFiguresGridProps {
+  readonly card: PourCard;
+  readonly write: UnitWriter;
+  /** Whether there is room for three figures side by side. */
+  readonly isWide?: boolean;
+}
+
 /** Every figure of the card; each tells, when touched, its rule, what went in, and whose rule it is. */
-export const CardFiguresGrid = ({ card, write }: { readonly card: PourCard; readonly write: UnitWriter }) => {
+export const CardFiguresGrid = ({ card, write, isWide = false }: CardFiguresGridProps) => {
   const { figures } = card.context;
   return (
-    <div role="group" aria-label="Figures of this card" className="grid grid-cols-2 gap-x-4 gap-y-3">
+    <div
+      role="group"
+      aria-label="Figures of this card"
+      className={`grid gap-x-4 gap-y-3 ${isWide ? 'grid-cols-3 portrait:grid-cols-2' : 'grid-cols-2'}`}
+    >
       {rowsOf(card.context, write).map(({ key, label, value }) => (
-        <div key={key} className={key === 'quench' ? 'col-span-2 grid' : 'grid'}>
+        <div key={key} className={key === 'quench' && !isWide ? 'col-span-2 grid' : 'grid'}>
           <FigureBasis
             label={label}
             value={value}

@@ -106,7 +106,7 @@ export const CardMenu = ({ card, write, running, onAside }: CardMenuProps) => {
           </>
         }
       >
-        <CardFiguresGrid card={card} write={write} />
+        <CardFiguresGrid card={card} write={write} isWide />
       </Dialog>
     </>
   );

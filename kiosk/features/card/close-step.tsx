@@ -67,14 +67,15 @@ export const CloseStep = ({ running }: { readonly running: RunningCard }) => {
         sentence={card.instruction.sentences.close}
         number={cast?.figure ?? '–'}
         unit={unit}
-        state={
+        sub={
           isDoubted && doubt ? (
-            <span role="alert">
+            <span role="alert" className="text-ink">
               <StateMark state="caution" text={doubt} size="desk" />
             </span>
-          ) : undefined
+          ) : (
+            `${write.mass(metalIn)} in, less button and loss.`
+          )
         }
-        sub={`${write.mass(metalIn)} in, less button and loss.`}
         gauge={
           <NumberPad
             label={massLabels[field]}
