@@ -2,6 +2,7 @@ import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query
 import type {
   ChargeProposal,
   PlanChargeRequest,
+  RunningCharge,
   SavedChargePlan,
   SavePlanRequest,
 } from '#shared/contracts/charge.ts';
@@ -14,6 +15,15 @@ export const chargePlanQuery = (castingId: string) =>
     // No plan is answered with no content at all.
     queryFn: async () =>
       (await http.get<SavedChargePlan | undefined>(`/api/charge-plans?castingId=${castingId}`)) ?? null,
+  });
+
+/** Where the charge of a running card stands, and what remains; asked anew for each state of its crucible. */
+export const runningChargeQuery = (meltId: string, crucible: string) =>
+  queryOptions({
+    queryKey: ['melts', meltId, 'charge', crucible],
+    queryFn: () => http.get<RunningCharge>(`/api/melts/${meltId}/charge`),
+    staleTime: Number.POSITIVE_INFINITY,
+    retry: false,
   });
 
 /** Plans a charge from the lots on hand; nothing is kept. */

@@ -3,6 +3,7 @@ import type { ChargeLine, ChargeOutcome, ChargeProposal, SavedChargePlan } from 
 import { formatFineness, lotKindNames } from '#shared/domain/metal/lot.ts';
 import { Crucible } from '#src/ui/crucible.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
+import { finenessRange } from '#src/ui/fineness-range.ts';
 import { FinenessScale } from '#src/ui/fineness-scale.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
@@ -35,14 +36,6 @@ const Lines = ({ caption, lines }: { readonly caption: string; readonly lines: r
     />
   );
 };
-
-/** How far beyond mark and worst case the scale goes, parts per thousand. */
-const marginPpt = 10;
-
-const scaleRange = (mark: number, worst: number) => ({
-  low: Math.max(0, Math.min(mark, worst) - marginPpt),
-  high: Math.min(1000, Math.max(mark, worst) + marginPpt),
-});
 
 /** A charge that holds every limit: what to weigh, what it comes to, and how good it is. */
 export const PlannedCharge = ({
@@ -88,7 +81,7 @@ export const PlannedCharge = ({
         <FinenessScale
           mark={markPpt}
           worst={worstPpt}
-          range={scaleRange(markPpt, worstPpt)}
+          range={finenessRange(markPpt, worstPpt)}
           format={formatFineness}
         />
       </div>

@@ -1,0 +1,55 @@
+import { lotKindNames } from '#shared/domain/metal/lot.ts';
+import type { ChargeLineState } from '#shared/domain/pour-card/charge-lines.ts';
+import { StateMark } from '#src/ui/state-mark.tsx';
+import { splitFigure, type UnitWriter } from '#kiosk/lib/unit-writer.ts';
+
+/** Props of {@link LotList}. */
+export interface LotListProps {
+  readonly lines: readonly ChargeLineState[];
+  readonly write: UnitWriter;
+  readonly onChoose: (code: string) => void;
+}
+
+const marks = {
+  done: { state: 'ready', text: 'in' },
+  next: { state: 'wait', text: 'next' },
+  'to-come': null,
+  over: { state: 'caution', text: 'over' },
+} as const;
+
+const massOf = ({ inG, toGoG, plannedG }: ChargeLineState, write: UnitWriter): string => {
+  const wantedG = toGoG > 0 ? inG + toGoG : plannedG;
+  if (wantedG === 0) return write.mass(inG);
+  return inG === 0 ? write.mass(wantedG) : `${splitFigure(write.mass(inG)).figure} of ${write.mass(wantedG)}`;
+};
+
+/** The lots of a charge, one under the other: what is in of each and what is wanted; each is chosen by a touch. */
+export const LotList = ({ lines, write, onChoose }: LotListProps) => (
+  <ul aria-label="Lots of this charge" className="grid min-h-0 content-start gap-4 overflow-y-auto p-1">
+    {lines.map((line) => {
+      const mark = marks[line.state];
+      return (
+        <li key={line.lotId} className="grid">
+          <button
+            type="button"
+            onClick={() => onChoose(line.code)}
+            className={`grid min-h-18 touch-manipulation grid-cols-[1fr_auto] items-center gap-x-3 rounded-2xl border-[3px] px-3 py-1.5 text-left select-none ${
+              line.state === 'next' ? 'border-ink bg-panel' : 'border-line'
+            }`}
+          >
+            <span className="text-2xl leading-tight font-black whitespace-nowrap">{line.code}</span>
+            <span className="justify-self-end text-xl leading-tight font-extrabold whitespace-nowrap">
+              {massOf(line, write)}
+            </span>
+            <span className="truncate text-xl leading-tight text-soft" title={line.name}>
+              {lotKindNames[line.kind]}
+            </span>
+            <span className="justify-self-end">
+              {mark ? <StateMark state={mark.state} text={mark.text} size="desk" /> : null}
+            </span>
+          </button>
+        </li>
+      );
+    })}
+  </ul>
+);

@@ -1,0 +1,81 @@
+import { useQuery } from '@tanstack/react-query';
+import type { ChargeOutcome } from '#shared/contracts/charge.ts';
+import type { Lot } from '#shared/contracts/lot.ts';
+import { mayBeCharged } from '#shared/domain/metal/lot.ts';
+import { adviseCharge, type ChargeAdvice, type LotAtHand } from '#shared/domain/pour-card/advise-charge.ts';
+import { chargeLines, type ChargeLineState } from '#shared/domain/pour-card/charge-lines.ts';
+import { runningChargeQuery } from '#src/api/charges.ts';
+import { lotsQuery } from '#src/api/lots.ts';
+import type { RunningCard } from './use-running-card.ts';
+
+/** How what is still to be weighed is known: as planned, corrected by the server, being asked, or not at all. */
+export type RestKnown = 'as-planned' | 'corrected' | 'asking' | 'unknown';
+
+/** A charge by lots as its screens see it. */
+export interface LotCharge {
+  readonly hasPlan: boolean;
+  readonly lines: readonly ChargeLineState[];
+  readonly next: ChargeLineState | null;
+  readonly rest: RestKnown;
+  /** What stands in the way of any remainder, by the server. */
+  readonly short: Extract<ChargeOutcome, { readonly kind: 'short' }> | null;
+  readonly advice: ChargeAdvice | null;
+  /** The lots that could be charged, as the server last said. */
+  readonly lots: readonly Lot[];
+}
+
+/** How often the server is asked again while it does not answer, or for lots that changed elsewhere, ms. */
+const againMs = { unanswered: 5_000, lots: 30_000 } as const;
+
+const atHandOf = ({ id, code, kind, compositionWt, toleranceWt, balanceG }: Lot): LotAtHand => ({
+  id,
+  code,
+  kind,
+  compositionWt,
+  toleranceWt,
+  onHandG: balanceG,
+});
+
+const isUsable = ({ kind, quarantineReason, balanceG }: Lot): boolean =>
+  mayBeCharged(kind) && quarantineReason === null && balanceG > 0;
+
+/** The lots with metal on hand, kept fresh while a charge is weighed in. */
+export const useLots = (): readonly Lot[] | undefined =>
+  useQuery({ ...lotsQuery('yes'), refetchInterval: againMs.lots }).data;
+
+/** What remains of a planned charge, asked of the server once it has every weighing. */
+const useRemainder = ({ card, state, waiting }: RunningCard, hasPlan: boolean) => {
+  const crucible = (state.lots ?? []).map(({ id, massG }) => `${id} ${massG}`).join(' ');
+  const isChanged = hasPlan && crucible !== '';
+  const { data, isFetching } = useQuery({
+    ...runningChargeQuery(card.melt.id, crucible),
+    enabled: isChanged && waiting === 0,
+    refetchInterval: ({ state: { status } }) => (status === 'error' ? againMs.unanswered : false),
+  });
+  const rest: RestKnown = !isChanged ? 'as-planned' : data ? 'corrected' : isFetching ? 'asking' : 'unknown';
+  return { rest, remainder: isChanged ? (data?.remainder ?? null) : null };
+};
+
+/** Puts a charge by lots together: the plan's lines, what is in, what remains, and what stands in the way. */
+export const useLotCharge = (running: RunningCard): LotCharge => {
+  const { card, state } = running;
+  const plan = card.chargePlan?.lines ?? [];
+  const { rest, remainder } = useRemainder(running, plan.length > 0);
+  const lots = (useLots() ?? []).filter(isUsable);
+  const lines = chargeLines({
+    plan,
+    lots: state.lots ?? [],
+    remainder: remainder?.kind === 'planned' ? remainder.lines : null,
+    tolerance: card.context.limits.chargeTolerance,
+  });
+  const planned = new Map(plan.map(({ lotId, massG }) => [lotId, massG]));
+  return {
+    hasPlan: plan.length > 0,
+    lines,
+    next: lines.find((line) => line.state === 'next') ?? null,
+    rest,
+    short: remainder?.kind === 'short' ? remainder : null,
+    advice: adviseCharge(state, card.context, planned, lots.map(atHandOf)),
+    lots,
+  };
+};
