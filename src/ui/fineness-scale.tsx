@@ -53,7 +53,7 @@ export const FinenessScale = (props: FinenessScaleProps) => {
         <g className="glide" style={{ transform: `translateX(${x(worst)}px)` }} data-part="worst">
           <path d={`M0 ${y - 10} l-15 -23 h30z`} className="fill-ink" />
           <text
-            x={nudges[worstSide]}
+            x={expected === null ? nudges[worstSide] : -6}
             y={y - 40}
             textAnchor={worstSide}
             className={`text-[24px] font-black ${worst < mark ? 'fill-ember' : 'fill-brass'}`}
@@ -65,7 +65,7 @@ export const FinenessScale = (props: FinenessScaleProps) => {
       {expected === null ? null : (
         <g className="glide" style={{ transform: `translateX(${x(expected)}px)` }} data-part="expected">
           <circle cy={y} r="9" className="fill-ground stroke-ink" strokeWidth="4" />
-          <text x="2" y={y - 40} className="fill-soft text-[24px] font-black">
+          <text x="10" y={y - 40} className="fill-soft text-[24px] font-black">
             {format(expected)} expected
           </text>
         </g>

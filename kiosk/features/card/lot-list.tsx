@@ -17,6 +17,8 @@ const marks = {
   over: { state: 'caution', text: 'over' },
 } as const;
 
+const row = 'flex items-center justify-between gap-2 leading-tight whitespace-nowrap';
+
 const massOf = ({ inG, toGoG, plannedG }: ChargeLineState, write: UnitWriter): string => {
   const wantedG = toGoG > 0 ? inG + toGoG : plannedG;
   if (wantedG === 0) return write.mass(inG);
@@ -33,20 +35,21 @@ export const LotList = ({ lines, write, onChoose }: LotListProps) => (
           <button
             type="button"
             onClick={() => onChoose(line.code)}
-            className={`grid min-h-18 touch-manipulation grid-cols-[1fr_auto] items-center gap-x-3 rounded-2xl border-[3px] px-3 py-1.5 text-left select-none ${
+            className={`grid min-h-18 touch-manipulation rounded-2xl border-[3px] px-3 py-1.5 text-left select-none ${
               line.state === 'next' ? 'border-ink bg-panel' : 'border-line'
             }`}
           >
-            <span className="text-2xl leading-tight font-black whitespace-nowrap">{line.code}</span>
-            <span className="justify-self-end text-xl leading-tight font-extrabold whitespace-nowrap">
-              {massOf(line, write)}
+            <span className={row}>
+              <span className="text-2xl font-black">{line.code}</span>
+              <span className="text-xl font-extrabold">{massOf(line, write)}</span>
             </span>
-            <span className="truncate text-xl leading-tight text-soft" title={line.name}>
-              {lotKindNames[line.kind]}
-            </span>
-            <span className="justify-self-end">
+            <span className={row}>
+              <span className="text-xl text-soft">{lotKindNames[line.kind]}</span>
               {mark ? <StateMark state={mark.state} text={mark.text} size="desk" /> : null}
             </span>
+            {line.name === '' ? null : (
+              <span className="truncate text-xl leading-tight text-soft">{line.name}</span>
+            )}
           </button>
         </li>
       );

@@ -4,6 +4,7 @@ import type { Lot } from '#shared/contracts/lot.ts';
 import { mayBeCharged } from '#shared/domain/metal/lot.ts';
 import { adviseCharge, type ChargeAdvice, type LotAtHand } from '#shared/domain/pour-card/advise-charge.ts';
 import { chargeLines, type ChargeLineState } from '#shared/domain/pour-card/charge-lines.ts';
+import { judgeCharge } from '#shared/domain/pour-card/judge-charge.ts';
 import { runningChargeQuery } from '#src/api/charges.ts';
 import { lotsQuery } from '#src/api/lots.ts';
 import type { RunningCard } from './use-running-card.ts';
@@ -43,39 +44,50 @@ const isUsable = ({ kind, quarantineReason, balanceG }: Lot): boolean =>
 export const useLots = (): readonly Lot[] | undefined =>
   useQuery({ ...lotsQuery('yes'), refetchInterval: againMs.lots }).data;
 
-/** What remains of a planned charge, asked of the server once it has every weighing. */
-const useRemainder = ({ card, state, waiting }: RunningCard, hasPlan: boolean) => {
+/** What remains of a charge that no longer goes by its plan, asked of the server once it has every weighing. */
+const useRemainder = ({ card, state, waiting }: RunningCard, isOff: boolean) => {
   const crucible = (state.lots ?? []).map(({ id, massG }) => `${id} ${massG}`).join(' ');
-  const isChanged = hasPlan && crucible !== '';
   const { data, isFetching } = useQuery({
     ...runningChargeQuery(card.melt.id, crucible),
-    enabled: isChanged && waiting === 0,
+    enabled: isOff && waiting === 0,
     refetchInterval: ({ state: { status } }) => (status === 'error' ? againMs.unanswered : false),
   });
-  const rest: RestKnown = !isChanged ? 'as-planned' : data ? 'corrected' : isFetching ? 'asking' : 'unknown';
-  return { rest, remainder: isChanged ? (data?.remainder ?? null) : null };
+  const rest: RestKnown = !isOff ? 'as-planned' : data ? 'corrected' : isFetching ? 'asking' : 'unknown';
+  return { rest, remainder: isOff ? (data?.remainder ?? null) : null };
+};
+
+/** Whether what was planned no longer leads to a good charge: a lot is over its line, or all are in and it is not good. */
+const isOffPlan = (
+  { card, state }: RunningCard,
+  lines: readonly ChargeLineState[],
+  advice: ChargeAdvice | null,
+): boolean => {
+  if (!card.chargePlan || (state.lots ?? []).length === 0) return false;
+  const isAllIn = lines.every((line) => line.state === 'done');
+  const isGood = advice === null && judgeCharge(state, card.context).kind === 'good';
+  return lines.some((line) => line.state === 'over') || (isAllIn && !isGood);
 };
 
 /** Puts a charge by lots together: the plan's lines, what is in, what remains, and what stands in the way. */
 export const useLotCharge = (running: RunningCard): LotCharge => {
   const { card, state } = running;
   const plan = card.chargePlan?.lines ?? [];
-  const { rest, remainder } = useRemainder(running, plan.length > 0);
   const lots = (useLots() ?? []).filter(isUsable);
-  const lines = chargeLines({
-    plan,
-    lots: state.lots ?? [],
-    remainder: remainder?.kind === 'planned' ? remainder.lines : null,
-    tolerance: card.context.limits.chargeTolerance,
-  });
   const planned = new Map(plan.map(({ lotId, massG }) => [lotId, massG]));
+  const advice = adviseCharge(state, card.context, planned, lots.map(atHandOf));
+  const { chargeTolerance: tolerance } = card.context.limits;
+  const progress = { plan, lots: state.lots ?? [], tolerance };
+  const asPlanned = chargeLines({ ...progress, remainder: null });
+  const { rest, remainder } = useRemainder(running, isOffPlan(running, asPlanned, advice));
+  const lines =
+    remainder?.kind === 'planned' ? chargeLines({ ...progress, remainder: remainder.lines }) : asPlanned;
   return {
     hasPlan: plan.length > 0,
     lines,
     next: lines.find((line) => line.state === 'next') ?? null,
     rest,
     short: remainder?.kind === 'short' ? remainder : null,
-    advice: adviseCharge(state, card.context, planned, lots.map(atHandOf)),
+    advice,
     lots,
   };
 };
