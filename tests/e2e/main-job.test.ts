@@ -78,6 +78,7 @@ const walkCard = async (terminal: TerminalDriver, job: Job) => {
   await terminal.hold('Hold to open the card');
   await terminal.guard();
 
+  await terminal.withoutLots();
   // A decimal comma is read as it is meant.
   await terminal.weighIn('Returns', returnsG.toFixed(2).replace('.', ','));
   await terminal.weighIn('Grain', grainG.toFixed(2));

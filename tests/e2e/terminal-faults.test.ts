@@ -51,7 +51,7 @@ describe('a terminal in trouble', () => {
     const context = terminal.page.context();
     const { castingId, meltId } = await cardAhead(terminal.page, studio, 147, 'charge');
     await terminal.openCard(castingId);
-    await terminal.button('Grain in').waitFor();
+    await terminal.withoutLots();
     await studio.suspend();
     try {
       await terminal.weighIn('Grain', '31.4');
@@ -86,6 +86,7 @@ describe('a terminal in trouble', () => {
       if (sent === 1) await route.abort('connectionreset');
       else await route.fulfill({ response: answer });
     });
+    await terminal.withoutLots();
     await terminal.weighIn('Grain', '20');
     await page.getByText(/record waits/).waitFor();
     await waitFor('a second delivery', () => sent > 1);

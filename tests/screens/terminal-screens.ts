@@ -3,6 +3,7 @@ import { buildFlaskCode } from '#shared/lib/codes.ts';
 import type { ServedStudio } from '#tests/support/served-studio.ts';
 import { demoPerson, driveTerminal } from '#tests/support/terminal-driver.ts';
 import { sizes, type Capture } from './capture.ts';
+import { captureCharge, captureLooseCharge, planCharge } from './charge-screens.ts';
 
 /** The terminal's screens, met in the order a caster meets them on one card. */
 export const captureTerminal = async (
@@ -14,6 +15,8 @@ export const captureTerminal = async (
   const page = await context.newPage();
   const terminal = driveTerminal(page, studio.origin);
   const shoot = (name: string): Promise<void> => capture(page, name, sizes.terminal);
+
+  const plan = await planCharge(studio);
 
   await page.goto(`${studio.origin}/kiosk`);
   await terminal.heading(/not a terminal yet/).waitFor();
@@ -32,6 +35,8 @@ export const captureTerminal = async (
   await shoot('05-refused-code');
   await page.goto(`${studio.origin}/kiosk`);
   await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
+  await captureLooseCharge(terminal, studio, shoot);
+  await page.goto(`${studio.origin}/kiosk`);
   await terminal.scanWithWedge(buildFlaskCode(147));
   await terminal.heading(/Check the flask/).waitFor();
   await shoot('06-card');
@@ -39,14 +44,7 @@ export const captureTerminal = async (
   await page.getByRole('group', { name: 'Cautions' }).waitFor();
   await shoot('07-guard');
   await terminal.guard();
-  await terminal.weighIn('Returns', '32');
-  await page.getByRole('button', { name: 'Grain in' }).waitFor();
-  await shoot('08-charge');
-  await terminal.button('Grain in').click();
-  await terminal.type('52,15');
-  await shoot('09-weigh-in');
-  await terminal.button(/^Put in/).click();
-  await terminal.hold(/Complete\. Hold/);
+  await captureCharge(terminal, shoot, plan);
   await page.getByRole('button', { name: 'Type a reading' }).waitFor();
   await shoot('10-melt-no-reading');
   await terminal.read('891');

@@ -41,6 +41,18 @@ export const driveCharge = (terminal: TerminalDriver) => {
       await button(/^Put in/).click();
     },
 
+    /** Types a line as a balance that is a keyboard does: all at once, ending in Enter. */
+    balanceTypes: (line: string): Promise<void> =>
+      page.evaluate(
+        (keys) => {
+          for (const key of keys)
+            document.body.dispatchEvent(
+              new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }),
+            );
+        },
+        [...line, 'Enter'],
+      ),
+
     /** Chooses the serial port of the balance, as it stands. */
     connectBalance: async (): Promise<void> => {
       await button('Connect the balance').click();

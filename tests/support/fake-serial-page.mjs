@@ -10,7 +10,8 @@
       return readable;
     },
     open() {
-      if (!isPlugged || readable) return Promise.reject(new DOMException('Not to be opened.', 'NetworkError'));
+      if (!isPlugged || readable)
+        return Promise.reject(new DOMException('Not to be opened.', 'NetworkError'));
       readable = new ReadableStream({
         start(controller) {
           control = controller;

@@ -66,7 +66,14 @@ export const driveTerminal = (page: Page, origin: string) => {
       await hold(button(/Guarded/));
     },
 
-    /** Weighs in one kind of metal, as typed. */
+    /** Says that the metal at hand is of no lot, where nothing is in yet and nothing was planned. */
+    withoutLots: async (): Promise<void> => {
+      await button('Scan a lot').click();
+      await button('The metal has no lot').click();
+      await button('Grain in').waitFor();
+    },
+
+    /** Weighs in one kind of metal that is of no lot, as typed. */
     weighIn: async (kind: 'Returns' | 'Grain', typed: string): Promise<void> => {
       await button(`${kind} in`).click();
       await page.getByRole('heading', { name: /How much/ }).waitFor();

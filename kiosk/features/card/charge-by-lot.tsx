@@ -82,7 +82,7 @@ export interface ChargeByLotProps {
 /** Metal into the crucible lot by lot, by the plan where there is one. */
 export const ChargeByLot = ({ running, onLoose }: ChargeByLotProps) => {
   const charge = useLotCharge(running);
-  const { choice, choose, scan, clear } = useLotChoice(charge);
+  const { choice, choose, chooseScanned, scan, clear } = useLotChoice(charge);
   const [isTakingOut, setIsTakingOut] = useState(false);
   if (isTakingOut) {
     const advised = charge.advice?.out?.lotId;
@@ -94,13 +94,14 @@ export const ChargeByLot = ({ running, onLoose }: ChargeByLotProps) => {
       <WeighLot key={lot.id} running={running} charge={charge} lot={lot} onCode={choose} onDone={clear} />
     );
   }
-  if (choice.kind !== 'none') {
+  // A lot that was touched is not looked for by the camera meanwhile: it might see another.
+  if (choice.kind !== 'none' && (choice.kind !== 'asking' || choice.isScanning)) {
     return (
       <FindLot
         running={running}
         charge={charge}
         choice={choice}
-        onCode={choose}
+        onCode={chooseScanned}
         onBack={clear}
         onLoose={onLoose}
       />

@@ -120,7 +120,7 @@ const say = (charge: LotCharge, state: Judged, context: CardContext, write: Unit
       sentence: 'The whole charge is in.',
       mass: write.mass(verdict.totalG),
       state: isOff ? 'caution' : 'ready',
-      stateWords: off ?? 'Ready, as planned',
+      stateWords: off ?? (rest === 'as-planned' ? 'Ready, as planned' : 'Ready, as corrected'),
       blocked: null,
     };
   }

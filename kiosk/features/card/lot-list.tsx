@@ -17,7 +17,7 @@ const marks = {
   over: { state: 'caution', text: 'over' },
 } as const;
 
-const row = 'flex items-center justify-between gap-2 leading-tight whitespace-nowrap';
+const row = 'flex items-center justify-between gap-2 leading-[1.12] whitespace-nowrap';
 
 const massOf = ({ inG, toGoG, plannedG }: ChargeLineState, write: UnitWriter): string => {
   const wantedG = toGoG > 0 ? inG + toGoG : plannedG;
@@ -35,7 +35,7 @@ export const LotList = ({ lines, write, onChoose }: LotListProps) => (
           <button
             type="button"
             onClick={() => onChoose(line.code)}
-            className={`grid min-h-18 touch-manipulation rounded-2xl border-[3px] px-3 py-1.5 text-left select-none ${
+            className={`grid min-h-18 touch-manipulation content-center rounded-2xl border-[3px] px-3 py-1 text-left select-none ${
               line.state === 'next' ? 'border-ink bg-panel' : 'border-line'
             }`}
           >
@@ -48,7 +48,7 @@ export const LotList = ({ lines, write, onChoose }: LotListProps) => (
               {mark ? <StateMark state={mark.state} text={mark.text} size="desk" /> : null}
             </span>
             {line.name === '' ? null : (
-              <span className="truncate text-xl leading-tight text-soft">{line.name}</span>
+              <span className="truncate text-xl leading-[1.12] text-soft">{line.name}</span>
             )}
           </button>
         </li>

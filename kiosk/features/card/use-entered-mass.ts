@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { refuse, type Result } from '#shared/lib/result.ts';
-import type { Grams } from '#shared/lib/units.ts';
+import type { Grams, MassUnit } from '#shared/lib/units.ts';
 import { useBalance, type Balance } from '#kiosk/lib/instrument/use-balance.ts';
 import { splitFigure, type UnitWriter } from '#kiosk/lib/unit-writer.ts';
 import { usePastedText } from '#kiosk/lib/use-pasted-text.ts';
@@ -21,6 +21,13 @@ export interface EnteredMass {
 }
 
 type Taken = { readonly line: string; readonly read: Result<Grams> };
+
+/** A unit typed behind the figure counts as well, as slow balances and people write it. */
+const readTyped = (text: string, unit: MassUnit): Result<Grams> => {
+  const typed = readTypedMass(text, unit);
+  const line = typed.ok || !/[a-z]$/i.test(text) ? typed : readWeighedLine(text, unit);
+  return line.ok ? line : typed;
+};
 
 /** The live balance counts as long as nothing is typed. */
 const readLive = ({ reading, fault }: Balance): Result<Grams> | null => {
@@ -54,7 +61,7 @@ export const useEnteredMass = (write: UnitWriter, onLabel: (code: string) => boo
   });
   const figureOf = (grams: Grams): string => splitFigure(write.mass(grams)).figure;
   const common = { text, setText, balance };
-  if (text !== '') return { ...common, shown: text, read: readTypedMass(text, unit) };
+  if (text !== '') return { ...common, shown: text, read: readTyped(text, unit) };
   if (taken) {
     const shown = taken.read.ok ? figureOf(taken.read.value) : '–';
     return { ...common, shown, read: taken.read };

@@ -56,16 +56,23 @@ const useRemainder = ({ card, state, waiting }: RunningCard, isOff: boolean) => 
   return { rest, remainder: isOff ? (data?.remainder ?? null) : null };
 };
 
+const isGood = ({ card, state }: RunningCard, advice: ChargeAdvice | null): boolean =>
+  advice === null && judgeCharge(state, card.context).kind === 'good';
+
+/** In a charge that has come out well nothing is over any more. */
+const asDone = (line: ChargeLineState): ChargeLineState =>
+  line.state === 'over' ? { ...line, state: 'done' } : line;
+
 /** Whether what was planned no longer leads to a good charge: a lot is over its line, or all are in and it is not good. */
 const isOffPlan = (
-  { card, state }: RunningCard,
+  running: RunningCard,
   lines: readonly ChargeLineState[],
   advice: ChargeAdvice | null,
 ): boolean => {
+  const { card, state } = running;
   if (!card.chargePlan || (state.lots ?? []).length === 0) return false;
   const isAllIn = lines.every((line) => line.state === 'done');
-  const isGood = advice === null && judgeCharge(state, card.context).kind === 'good';
-  return lines.some((line) => line.state === 'over') || (isAllIn && !isGood);
+  return lines.some((line) => line.state === 'over') || (isAllIn && !isGood(running, advice));
 };
 
 /** Puts a charge by lots together: the plan's lines, what is in, what remains, and what stands in the way. */
@@ -79,8 +86,9 @@ export const useLotCharge = (running: RunningCard): LotCharge => {
   const progress = { plan, lots: state.lots ?? [], tolerance };
   const asPlanned = chargeLines({ ...progress, remainder: null });
   const { rest, remainder } = useRemainder(running, isOffPlan(running, asPlanned, advice));
-  const lines =
+  const corrected =
     remainder?.kind === 'planned' ? chargeLines({ ...progress, remainder: remainder.lines }) : asPlanned;
+  const lines = isGood(running, advice) ? corrected.map(asDone) : corrected;
   return {
     hasPlan: plan.length > 0,
     lines,

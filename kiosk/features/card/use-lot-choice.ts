@@ -10,7 +10,7 @@ import type { LotCharge } from './use-lot-charge.ts';
 export type LotChoice =
   | { readonly kind: 'none' }
   | { readonly kind: 'scanning' }
-  | { readonly kind: 'asking'; readonly code: string }
+  | { readonly kind: 'asking'; readonly code: string; readonly isScanning: boolean }
   | { readonly kind: 'refused'; readonly code: string; readonly sentence: string }
   | { readonly kind: 'chosen'; readonly lot: Lot };
 
@@ -33,7 +33,7 @@ export const useLotChoice = (charge: LotCharge) => {
   const [choice, setChoice] = useState<LotChoice>({ kind: 'none' });
   // An answer that comes after another code was read is of no interest any more.
   const latest = useRef(0);
-  const choose = async (text: string): Promise<void> => {
+  const choose = async (text: string, isScanning: boolean): Promise<void> => {
     const turn = (latest.current += 1);
     const end = (next: LotChoice): void => {
       if (turn === latest.current) setChoice(next);
@@ -41,7 +41,7 @@ export const useLotChoice = (charge: LotCharge) => {
     const parsed = parseLotCode(text);
     if (!parsed.ok) return end({ kind: 'refused', code: text, sentence: parsed.error });
     const code = parsed.value;
-    end({ kind: 'asking', code });
+    end({ kind: 'asking', code, isScanning });
     try {
       const lot = await lookUp(code, charge);
       const sentence = refusalOfLot(lot, charge);
@@ -57,7 +57,10 @@ export const useLotChoice = (charge: LotCharge) => {
   };
   return {
     choice,
-    choose: (text: string): void => void choose(text),
+    /** Takes a code from anywhere but the scanning screen, which is then not opened unless the lot is refused. */
+    choose: (text: string): void => void choose(text, false),
+    /** Takes a code from the scanning screen. */
+    chooseScanned: (text: string): void => void choose(text, true),
     scan: () => leave({ kind: 'scanning' }),
     clear: () => leave({ kind: 'none' }),
   };
