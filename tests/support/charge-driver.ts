@@ -1,6 +1,7 @@
 import type { Locator } from 'playwright-core';
 import type { FakeSerial } from './fake-serial.ts';
 import type { TerminalDriver } from './terminal-driver.ts';
+import { typeAtOnce } from './type-at-once.ts';
 
 /** Drives the charge step of a card whose metal is weighed in by lot. */
 export const driveCharge = (terminal: TerminalDriver) => {
@@ -42,16 +43,7 @@ export const driveCharge = (terminal: TerminalDriver) => {
     },
 
     /** Types a line as a balance that is a keyboard does: all at once, ending in Enter. */
-    balanceTypes: (line: string): Promise<void> =>
-      page.evaluate(
-        (keys) => {
-          for (const key of keys)
-            document.body.dispatchEvent(
-              new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }),
-            );
-        },
-        [...line, 'Enter'],
-      ),
+    balanceTypes: (line: string): Promise<void> => typeAtOnce(page, line),
 
     /** Chooses the serial port of the balance, as it stands. */
     connectBalance: async (): Promise<void> => {
