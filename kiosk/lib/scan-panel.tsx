@@ -2,9 +2,16 @@ import { useState } from 'react';
 import { Button } from '#src/ui/button.tsx';
 import { CodePad } from './code-pad.tsx';
 import { ScanFrame } from './scan-frame.tsx';
+import { scanWords, type ScannedThing } from './scanned-things.ts';
 
-/** The three ways to name a flask: camera, scanner, pad. */
-export const ScanPanel = ({ onCode }: { readonly onCode: (code: string) => void }) => {
+/** Props of {@link ScanPanel}. */
+export interface ScanPanelProps {
+  readonly of?: ScannedThing;
+  readonly onCode: (code: string) => void;
+}
+
+/** The three ways to name a flask or a lot: camera, scanner, pad. */
+export const ScanPanel = ({ of = 'flask', onCode }: ScanPanelProps) => {
   const [isTyping, setIsTyping] = useState(false);
   return (
     <section
@@ -14,7 +21,7 @@ export const ScanPanel = ({ onCode }: { readonly onCode: (code: string) => void 
       <ScanFrame onCode={onCode} className="min-h-[160px]" />
       <div className="grid content-center gap-3">
         <h2 id="scan-heading" className="text-[34px] leading-tight font-black">
-          Show me a flask
+          {scanWords[of].show}
         </h2>
         <Button size="terminal" icon="pad" onClick={() => setIsTyping(true)}>
           Type its number
@@ -22,6 +29,7 @@ export const ScanPanel = ({ onCode }: { readonly onCode: (code: string) => void 
       </div>
       {isTyping ? (
         <CodePad
+          of={of}
           onClose={() => setIsTyping(false)}
           onCode={(code) => {
             setIsTyping(false);

@@ -1,5 +1,10 @@
 import { summarise, type ChargePlan } from '#shared/domain/metal/charge-plan.ts';
-import type { ChargeLine, ChargeRequest } from '#shared/domain/metal/charge-request.ts';
+import {
+  leastWeighingMg,
+  massOfLines,
+  type ChargeLine,
+  type ChargeRequest,
+} from '#shared/domain/metal/charge-request.ts';
 import { toMilligrams } from '#shared/domain/metal/ledger.ts';
 import type { LotOnHand } from '#shared/domain/metal/lot.ts';
 import { chargedG, type CardContext } from '#shared/domain/pour-card/card-state.ts';
@@ -26,17 +31,20 @@ const weighedLines = async ({ models }: Services, { state }: Melt): Promise<read
   });
 };
 
-/** The lots of the plan first, so that nobody has to fetch others while they will do; all lots where they will not. */
+/** The planned lots that are not all in yet, then all of the plan, then every lot: nobody fetches others while these do. */
 const planRemainder = async (
   services: Services,
   castingId: string,
   request: Omit<ChargeRequest, 'lots'>,
 ): Promise<ChargeOutcome> => {
   const lots = await lotsToCharge(services);
-  const plan = await loadChargePlan(services, castingId);
-  const isPlanned = ({ id }: LotOnHand): boolean => plan?.lines.some(({ lotId }) => lotId === id) ?? false;
-  if (plan) {
-    const planned = await planCharge({ ...request, lots: lots.filter(isPlanned) });
+  const lines = (await loadChargePlan(services, castingId))?.lines ?? [];
+  const weighedMg = (lotId: string): number =>
+    massOfLines(request.weighed?.filter(({ lot }) => lot.id === lotId) ?? []);
+  const open = lines.filter(({ lotId, massMg }) => massMg - weighedMg(lotId) >= leastWeighingMg);
+  for (const tier of [open, lines].filter(({ length }) => length > 0)) {
+    const isInTier = ({ id }: LotOnHand): boolean => tier.some(({ lotId }) => lotId === id);
+    const planned = await planCharge({ ...request, lots: lots.filter(isInTier) });
     if (planned.kind === 'planned') return planned;
   }
   return planCharge({ ...request, lots });

@@ -6,6 +6,7 @@ import type {
   CloseOutRequest,
   FilledCrucible,
   PlanChargeRequest,
+  RunningCharge,
   SavedChargePlan,
   SavePlanRequest,
 } from '#shared/contracts/charge.ts';
@@ -19,6 +20,15 @@ export const chargePlanQuery = (castingId: string) =>
     // No plan is answered with no content at all.
     queryFn: async () =>
       (await http.get<SavedChargePlan | undefined>(`/api/charge-plans?castingId=${castingId}`)) ?? null,
+  });
+
+/** Where the charge of a running card stands, and what remains; asked anew for each state of its crucible. */
+export const runningChargeQuery = (meltId: string, crucible: string) =>
+  queryOptions({
+    queryKey: ['melts', meltId, 'charge', crucible],
+    queryFn: () => http.get<RunningCharge>(`/api/melts/${meltId}/charge`),
+    staleTime: Number.POSITIVE_INFINITY,
+    retry: false,
   });
 
 /** Plans a charge from the lots on hand; nothing is kept. */

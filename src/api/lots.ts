@@ -18,6 +18,10 @@ export const lotsQuery = (onHand: 'yes' | 'no') =>
     queryFn: () => http.get<Lot[]>(`/api/lots?onHand=${onHand}`),
   });
 
+/** Looks up what the label of a lot says, scanned or typed; rejects with the reason in one sentence. */
+export const findLot = (code: string): Promise<Lot> =>
+  http.get(`/api/lots/by-code?code=${encodeURIComponent(code)}`);
+
 /** One lot with its papers, its amendments and where its metal went. */
 export const lotQuery = (id: string) =>
   queryOptions({ queryKey: ['lots', id], queryFn: () => http.get<LotDetail>(`/api/lots/${id}`) });

@@ -11,6 +11,8 @@ export interface CrucibleProps {
   readonly wantedG: number;
   /** Writes a mass with its unit. */
   readonly format: (grams: number) => string;
+  /** False for the picture alone, where a list of the lots stands beside it. */
+  readonly labelled?: boolean;
   readonly className?: string;
 }
 
@@ -24,7 +26,7 @@ const fills: Readonly<Record<CrucibleLot['kind'], string>> = {
   other: 'fill-silver-fill opacity-45',
 };
 
-const sentence = ({ lots, wantedG, format }: Omit<CrucibleProps, 'className'>): string =>
+const sentence = ({ lots, wantedG, format }: Pick<CrucibleProps, 'lots' | 'wantedG' | 'format'>): string =>
   [
     ...lots.map((lot) => `${lot.label}: ${format(lot.inG)} in, of ${format(lot.plannedG)}.`),
     `Wanted in all: ${format(wantedG)}.`,
@@ -39,12 +41,12 @@ const progressWords = ({ inG, plannedG }: CrucibleLabel, format: (grams: number)
 };
 
 /** The crucible as it fills: a layer for each lot, hatching for what is still to come, and a line at the metal wanted. */
-export const Crucible = ({ lots, wantedG, format, className }: CrucibleProps) => {
+export const Crucible = ({ lots, wantedG, format, labelled = true, className }: CrucibleProps) => {
   const id = useId();
   const { layers, labels, wantedY } = crucibleLayers(lots, wantedG, inner.top, inner.bottom);
   return (
     <svg
-      viewBox="0 0 564 424"
+      viewBox={labelled ? '0 0 564 424' : '8 36 300 384'}
       role="img"
       aria-label={sentence({ lots, wantedG, format })}
       className={className ?? 'w-full'}
@@ -88,12 +90,12 @@ export const Crucible = ({ lots, wantedG, format, className }: CrucibleProps) =>
         strokeLinecap="round"
       />
       <path d={`M22 ${wantedY} H294`} className="stroke-ember" strokeWidth="6" strokeDasharray="16 9" />
-      <g className="fill-ember font-black">
-        <text x="310" y={wantedY + 8} className="text-[24px]">
+      {labelled ? (
+        <text x="310" y={wantedY + 8} className="fill-ember text-[24px] font-black">
           {format(wantedG)} wanted
         </text>
-      </g>
-      {labels.map((label) => (
+      ) : null}
+      {(labelled ? labels : []).map((label) => (
         <g key={label.key} transform={`translate(310 ${label.y})`}>
           <path d="M-44 0 h34" className="stroke-ink" strokeWidth="3" />
           <text y="-2" className="fill-ink text-[24px] font-black">

@@ -28,6 +28,20 @@ export interface TerminalFrameProps {
   readonly actions: ReactNode;
 }
 
+const code = /([A-Z]-\d{4,6}-\d)/;
+
+/** Text whose codes, such as M-0006-3, stay on one line. */
+const unbroken = (text: string): ReactNode =>
+  text.split(code).map((part, index) =>
+    index % 2 === 1 ? (
+      <span key={index} className="whitespace-nowrap">
+        {part}
+      </span>
+    ) : (
+      part
+    ),
+  );
+
 /** Letters of a unit that find room beside five digits of the largest size. */
 const shortUnit = 2;
 
@@ -57,7 +71,9 @@ export const TerminalFrame = (props: TerminalFrameProps) => {
       >
         {props.tree ? <div className="[grid-area:tree]">{props.tree}</div> : null}
         <div className="min-w-0 pt-3 [grid-area:words]">
-          <h1 className="text-[40px] leading-[1.18] font-extrabold text-balance">{props.sentence}</h1>
+          <h1 className="text-[40px] leading-[1.18] font-extrabold text-balance">
+            {unbroken(props.sentence)}
+          </h1>
           {props.number === undefined ? null : <TheNumber number={props.number} unit={props.unit} />}
           {props.state ? <div className="mt-5">{props.state}</div> : null}
           {props.sub ? <div className="mt-2 text-[26px] leading-[1.35] text-soft">{props.sub}</div> : null}

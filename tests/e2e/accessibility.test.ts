@@ -4,9 +4,11 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
 import { checksBefore } from '#tests/factories/card-events.ts';
 import { cardAhead } from '#tests/support/card-ahead.ts';
+import { driveCharge } from '#tests/support/charge-driver.ts';
 import { driveDesk } from '#tests/support/desk-driver.ts';
 import { serveStudio, type ServedStudio } from '#tests/support/served-studio.ts';
 import type { TerminalDriver } from '#tests/support/terminal-driver.ts';
+import { demoLot } from '#tests/support/plan-charge-for.ts';
 import { openTerminalFloor, type TerminalFloor } from '#tests/support/terminal-floor.ts';
 import { createTestDatabase, type TestDatabase } from '#tests/support/test-database.ts';
 
@@ -155,6 +157,16 @@ describe('accessibility, by axe against WCAG 2.2 AA', () => {
       for (const event of events) expect((await card.deliver(event)).status()).toBe(201);
     };
     await deliverAll([...checksBefore('guard', card.context), ...checksBefore('charge', card.context)]);
+    await page.reload();
+    await terminal.button('Scan a lot').waitFor();
+    await look('charge by lot');
+    const charge = driveCharge(terminal);
+    await charge.scanLot((await demoLot(studio.services, /Sterling, casting/, 'grain')).code);
+    await look('weighing a lot');
+    await terminal.button('Back').click();
+    await terminal.button('Scan a lot').click();
+    await terminal.heading(/Show me the label/).waitFor();
+    await look('finding a lot');
     await card.deliver({ type: 'charge-weighed', kind: 'grain', massG: card.plannedG });
     await page.reload();
     await terminal.button('Grain in').waitFor();
@@ -233,7 +245,7 @@ it.each(['g', 'dwt', 'ozt'] as const)(
     const card = await cardAhead(terminal.page, studio, flask, 'charge');
     for (const event of checksBefore('charge', card.context)) await card.deliver(event);
     await terminal.openCard(card.castingId);
-    await terminal.button('Grain in').waitFor();
+    await terminal.withoutLots();
     await settle(terminal.page);
     // The words' column holds the number; the crucible's labels stay within its picture.
     const spill = await terminal.page.evaluate(() => {

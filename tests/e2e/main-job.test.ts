@@ -79,6 +79,7 @@ const walkCard = async (terminal: TerminalDriver, job: Job) => {
   await terminal.guard();
   await terminal.readOn();
 
+  await terminal.withoutLots();
   // A decimal comma is read as it is meant.
   await terminal.weighIn('Returns', returnsG.toFixed(2).replace('.', ','));
   await terminal.weighIn('Grain', grainG.toFixed(2));

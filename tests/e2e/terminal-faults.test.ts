@@ -56,7 +56,7 @@ describe('a terminal in trouble', () => {
     const { castingId, meltId } = await cardAhead(terminal.page, studio, 147, 'charge');
     await terminal.openCard(castingId);
     await terminal.readOn();
-    await terminal.button('Grain in').waitFor();
+    await terminal.withoutLots();
     await waitFor('the reading in the melt book', () => isIdle(terminal));
     await studio.suspend();
     try {
@@ -94,6 +94,7 @@ describe('a terminal in trouble', () => {
       if (sent === 1) await route.abort('connectionreset');
       else await route.fulfill({ response: answer });
     });
+    await terminal.withoutLots();
     await terminal.weighIn('Grain', '20');
     await page.getByText(/record waits/).waitFor();
     await waitFor('a second delivery', () => sent > 1);

@@ -6,6 +6,7 @@ import { openPreview } from '#tests/support/open-preview.ts';
 import type { ServedStudio } from '#tests/support/served-studio.ts';
 import { demoPerson, driveTerminal } from '#tests/support/terminal-driver.ts';
 import { sizes, type Capture } from './capture.ts';
+import { captureCharge, captureLooseCharge, planCharge } from './charge-screens.ts';
 
 /** The screens of single steps, walked in the desk's preview, which records nothing. */
 const capturePreview = async (
@@ -67,6 +68,8 @@ export const captureTerminal = async (
   const terminal = driveTerminal(page, studio.origin);
   const shoot = (name: string): Promise<void> => capture(page, name, sizes.terminal);
 
+  const plan = await planCharge(studio);
+
   await page.goto(`${studio.origin}/kiosk`);
   await terminal.heading(/not a terminal yet/).waitFor();
   await shoot('01-enrol');
@@ -100,6 +103,8 @@ export const captureTerminal = async (
   await shoot('05-refused-code');
   await page.goto(`${studio.origin}/kiosk`);
   await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
+  await captureLooseCharge(terminal, studio, shoot);
+  await page.goto(`${studio.origin}/kiosk`);
   await terminal.scanWithWedge(buildFlaskCode(147));
   await terminal.heading(/Check the flask/).waitFor();
   await shoot('06-card');
@@ -110,14 +115,7 @@ export const captureTerminal = async (
   await page.getByText('Read this').waitFor();
   await shoot('07a-words');
   await terminal.readOn();
-  await terminal.weighIn('Returns', '32');
-  await page.getByRole('button', { name: 'Grain in' }).waitFor();
-  await shoot('08-charge');
-  await terminal.button('Grain in').click();
-  await terminal.type('52,15');
-  await shoot('09-weigh-in');
-  await terminal.button(/^Put in/).click();
-  await terminal.hold(/Complete\. Hold/);
+  await captureCharge(terminal, shoot, plan);
   await page.getByRole('button', { name: 'Type a reading' }).waitFor();
   await shoot('10-melt-no-reading');
   await terminal.read('891');

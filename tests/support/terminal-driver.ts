@@ -1,8 +1,9 @@
 import type { Locator, Page } from 'playwright-core';
+import { typeAtOnce } from './type-at-once.ts';
 import { demoEnrolmentCode, demoPeople, type DemoPerson } from '#server/services/demo-studio/people.ts';
 
 /** Longer than any hold takes, also on a machine that is busy. */
-const holdMs = 1_600;
+const holdMs = 10_000;
 
 /** A person of the demo studio by sign-in name. */
 export const demoPerson = (login: string): DemoPerson => {
@@ -11,8 +12,14 @@ export const demoPerson = (login: string): DemoPerson => {
   return person;
 };
 
-/** Presses a button and keeps it pressed until what it does is done. */
-const hold = (button: Locator): Promise<void> => button.click({ delay: holdMs });
+/** Presses a button and keeps it pressed until what it does is done: then it is gone, or says something else. */
+const hold = async (button: Locator): Promise<void> => {
+  const { mouse } = button.page();
+  await button.hover();
+  await mouse.down();
+  await button.waitFor({ state: 'detached', timeout: holdMs });
+  await mouse.up();
+};
 
 /** Drives the terminal as a person would, by what its screens say. */
 export const driveTerminal = (page: Page, origin: string) => {
@@ -49,8 +56,7 @@ export const driveTerminal = (page: Page, origin: string) => {
       if (/\/kiosk\/?$/.test(new URL(page.url()).pathname)) {
         await page.getByRole('region', { name: 'Work at this bay' }).waitFor();
       }
-      await page.keyboard.type(code);
-      await page.keyboard.press('Enter');
+      await typeAtOnce(page, code);
     },
 
     /** Opens a casting's card by its address. */
@@ -75,7 +81,14 @@ export const driveTerminal = (page: Page, origin: string) => {
       await cautions.waitFor({ state: 'detached' });
     },
 
-    /** Weighs in one kind of metal, as typed. */
+    /** Says that the metal at hand is of no lot, where nothing is in yet and nothing was planned. */
+    withoutLots: async (): Promise<void> => {
+      await button('Scan a lot').click();
+      await button('The metal has no lot').click();
+      await button('Grain in').waitFor();
+    },
+
+    /** Weighs in one kind of metal that is of no lot, as typed. */
     weighIn: async (kind: 'Returns' | 'Grain', typed: string): Promise<void> => {
       await button(`${kind} in`).click();
       await page.getByRole('heading', { name: /How much/ }).waitFor();

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { readTypedMass } from './typed-mass.ts';
+import { readTypedMass, readWeighedLine } from './typed-mass.ts';
 
 describe('readTypedMass', () => {
   it('reads a comma, and the studio’s unit', () => {
@@ -15,5 +15,22 @@ describe('readTypedMass', () => {
 
   it('lets nought through where nothing is a mass', () => {
     expect(readTypedMass('0', 'g', true)).toEqual({ ok: true, value: 0 });
+  });
+});
+
+describe('readWeighedLine', () => {
+  it('takes what a balance types, in its own unit, and a bare figure in the studio’s', () => {
+    expect(readWeighedLine('  12.345 g', 'ozt')).toEqual({ ok: true, value: 12.345 });
+    expect(readWeighedLine('1', 'ozt')).toEqual({ ok: true, value: 31.103 });
+  });
+
+  it.each([
+    ['~ 12.345 g', 'still moving'],
+    ['-0.02 g', 'above zero'],
+    ['L-0001-2', 'not a line of a balance'],
+    ['12 ct', 'ct'],
+  ])('refuses %j', (line, sentence) => {
+    const read = readWeighedLine(line, 'g');
+    expect(read.ok ? '' : read.error).toContain(sentence);
   });
 });

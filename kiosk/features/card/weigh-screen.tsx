@@ -13,7 +13,7 @@ export const WeighScreen = ({ running, step }: StepProps<StepOf<'weigh'>>) => (
     sub={limitWords(step.limitsG, running.write.mass)}
     mayBeNone
     actionWords={(mass) => `Take ${mass}`}
-    doubt={(massG) => {
+    remark={(massG) => {
       const verdict = judgeHere(running, step, { kind: 'weigh', massG });
       return verdict.kind === 'good' ? null : verdict.sentence;
     }}

@@ -3,6 +3,7 @@ import type { ChargeLine, ChargeOutcome, ChargeProposal, SavedChargePlan } from 
 import { formatFineness, lotKindNames } from '#shared/domain/metal/lot.ts';
 import { Crucible } from '#src/ui/crucible.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
+import { finenessRange } from '#src/ui/fineness-range.ts';
 import { FinenessScale } from '#src/ui/fineness-scale.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
@@ -45,15 +46,6 @@ export const ChargeLines = ({
     />
   );
 };
-
-/** How far a fineness scale goes beyond mark and worst case the scale goes, parts per thousand. */
-const marginPpt = 10;
-
-/** The span of a scale that shows a mark and a worst case. */
-export const scaleRange = (mark: number, worst: number) => ({
-  low: Math.max(0, Math.min(mark, worst) - marginPpt),
-  high: Math.min(1000, Math.max(mark, worst) + marginPpt),
-});
 
 /** A charge that holds every limit: what to weigh, what it comes to, and how good it is. */
 export const PlannedCharge = ({
@@ -99,7 +91,7 @@ export const PlannedCharge = ({
         <FinenessScale
           mark={markPpt}
           worst={worstPpt}
-          range={scaleRange(markPpt, worstPpt)}
+          range={finenessRange(markPpt, worstPpt)}
           format={formatFineness}
         />
         <MarkWords metal={proposal.markedMetal} worstPpt={worstPpt} markPpt={markPpt} />

@@ -3,13 +3,14 @@ import { markedMetal, type AlloyFamily } from '#shared/domain/alloy/alloy-family
 import { formatFineness } from '#shared/domain/metal/lot.ts';
 import { Crucible } from '#src/ui/crucible.tsx';
 import { DefinitionList } from '#src/ui/definition-list.tsx';
+import { finenessRange } from '#src/ui/fineness-range.ts';
 import { FinenessScale } from '#src/ui/fineness-scale.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
 import { MarkWords } from '#src/desk/parts/mark-words.tsx';
 import { Panel } from '#src/desk/parts/panel.tsx';
 import { writeComposition } from '#src/desk/parts/element-names.ts';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
-import { ChargeLines, scaleRange, ShortCharge } from './charge-view.tsx';
+import { ChargeLines, ShortCharge } from './charge-view.tsx';
 import { writeWeighable } from './metal-mass.ts';
 
 type Planned = Extract<ChargeOutcome, { readonly kind: 'planned' }>;
@@ -78,7 +79,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
         <FinenessScale
           mark={target.fineness}
           worst={worstPpt}
-          range={scaleRange(target.fineness, worstPpt)}
+          range={finenessRange(target.fineness, worstPpt)}
           format={formatFineness}
         />
         <MarkWords metal={markedMetal(target.family)} worstPpt={worstPpt} markPpt={target.fineness} />
