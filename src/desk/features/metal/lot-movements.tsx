@@ -80,6 +80,7 @@ export const LotMovements = ({ lotId }: { readonly lotId: string }) => {
               caption="Movements of the lot"
               align="left"
               heads={['When', 'Who', 'From', 'To', 'Mass', 'What', 'Put right']}
+              figures={[4]}
               rows={movements.map((movement) => ({
                 key: movement.id,
                 cells: [
