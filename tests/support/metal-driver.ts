@@ -78,7 +78,7 @@ export const driveMetal = (page: Page, origin: string) => {
       const only = page.getByRole('checkbox', { name: /^Take the .* only/ });
       if ((await only.count()) > 0) await only.check();
       await page.getByRole('button', { name: /^Take \d+ lots? in$/ }).click();
-      const result = page.getByText(/taken in/);
+      const result = page.getByText(/^\d+ lots? (is|are) taken in/);
       await result.waitFor();
       return result.innerText();
     },

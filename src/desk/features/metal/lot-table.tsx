@@ -35,7 +35,8 @@ const columnsFor = ({ mass }: StudioWriting, nowMs: number) => [
   column.display({
     id: 'composition',
     header: 'Composition, wt%',
-    cell: ({ row }) => writeComposition(row.original.compositionWt),
+    // A symbol and its figure stay on one line.
+    cell: ({ row }) => writeComposition(row.original.compositionWt).replaceAll(/([a-z]) /g, '$1\u00a0'),
   }),
   column.accessor((lot) => finenessOf(lot)?.expected ?? -1, {
     id: 'fineness',

@@ -31,7 +31,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
   const { lines, totalG, partsWt, expectedPpt, worstPpt } = outcome;
   const mass = (grams: number): string => writeWeighable(grams, units.mass);
   return (
-    <div className="grid gap-x-14 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,420px)]">
+    <div className="grid gap-8">
       <div className="grid content-start gap-6">
         {lines.length === 0 ? (
           <StateMark state="ready" text={`It is ${target.name} as it is: nothing is to be added.`} />
@@ -51,7 +51,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
             {
               term: 'Fineness at the worst',
               value: formatFineness(worstPpt),
-              note: 'by the certificates’ lower bounds',
+              note: 'at lower bounds',
             },
             { term: 'Composition then, wt%', value: writeComposition(partsWt) },
           ]}
@@ -60,7 +60,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
           Nothing is kept or moved by this: weigh the lots in at the terminal, or count them afterwards.
         </p>
       </div>
-      <div className="grid content-start gap-6">
+      <div className="grid items-end gap-6 sm:grid-cols-2">
         <Crucible
           lots={[
             { key: 'pot', label: 'the pot', kind: 'other', inG: pot.massG, plannedG: pot.massG },
@@ -75,13 +75,15 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
           wantedG={totalG}
           format={mass}
         />
-        <FinenessScale
-          mark={target.fineness}
-          worst={worstPpt}
-          range={scaleRange(target.fineness, worstPpt)}
-          format={formatFineness}
-        />
-        <MarkWords metal={markedMetal(target.family)} worstPpt={worstPpt} markPpt={target.fineness} />
+        <div className="grid gap-4">
+          <FinenessScale
+            mark={target.fineness}
+            worst={worstPpt}
+            range={scaleRange(target.fineness, worstPpt)}
+            format={formatFineness}
+          />
+          <MarkWords metal={markedMetal(target.family)} worstPpt={worstPpt} markPpt={target.fineness} />
+        </div>
       </div>
     </div>
   );
