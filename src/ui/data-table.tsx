@@ -54,7 +54,7 @@ const HeadCell = <Row,>({ header }: { readonly header: Header<Row, unknown> }) =
     <th
       scope="col"
       aria-sort={order ? ariaSort[order] : undefined}
-      className={`border-b-[3px] border-ink py-1 pr-5 text-[15px] font-extrabold text-soft ${alignment(column.columnDef.meta?.align)}`}
+      className={`border-b-[3px] border-ink py-1 pr-5 text-[15px] font-extrabold whitespace-nowrap text-soft ${alignment(column.columnDef.meta?.align)}`}
     >
       {column.getCanSort() ? (
         <button

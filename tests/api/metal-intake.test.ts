@@ -96,7 +96,7 @@ describe('looking through a sheet', () => {
     expect(rows[0]).toMatchObject({ massG: 311.035, faults: [], questions: [] });
     expect([questioned, rows[1]?.questions[0]]).toEqual([
       1,
-      expect.stringContaining('is it in grams, not ounces?'),
+      { column: 2, message: expect.stringContaining('is it in grams, not ounces?') as string },
     ]);
   });
 });

@@ -1,8 +1,7 @@
-import AxeBuilder from '@axe-core/playwright';
-import type { Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
 import { checksBefore } from '#tests/factories/card-events.ts';
+import { faultsOn, settle } from '#tests/support/axe-faults.ts';
 import { cardAhead } from '#tests/support/card-ahead.ts';
 import { driveCharge } from '#tests/support/charge-driver.ts';
 import { driveDesk } from '#tests/support/desk-driver.ts';
@@ -11,8 +10,6 @@ import type { TerminalDriver } from '#tests/support/terminal-driver.ts';
 import { demoLot } from '#tests/support/plan-charge-for.ts';
 import { openTerminalFloor, type TerminalFloor } from '#tests/support/terminal-floor.ts';
 import { createTestDatabase, type TestDatabase } from '#tests/support/test-database.ts';
-
-const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
 
 let database: TestDatabase;
 let studio: ServedStudio;
@@ -29,42 +26,6 @@ afterAll(async () => {
   await studio.close();
   await database.drop();
 });
-
-/** Lets fonts arrive and transitions end: a colour on its way has no contrast of its own. */
-const settle = (page: Page): Promise<unknown> =>
-  page.evaluate(async () => {
-    await document.fonts.ready;
-    await Promise.allSettled(
-      document
-        .getAnimations()
-        .filter(({ effect }) => effect?.getTiming().iterations !== Infinity)
-        .map((animation) => animation.finished),
-    );
-  });
-
-const faultsIn = async (axe: AxeBuilder, where: string): Promise<readonly string[]> => {
-  const { violations } = await axe.analyze();
-  return violations.map(
-    ({ id, nodes }) => `${where}: ${id} at ${nodes.map(({ target }) => target.join(' ')).join('; ')}`,
-  );
-};
-
-const paint = async (page: Page, theme: 'day' | 'melt-room'): Promise<void> => {
-  await page.evaluate(
-    (isDark) => document.documentElement.classList.toggle('melt-room', isDark),
-    theme === 'melt-room',
-  );
-  await settle(page);
-};
-
-/** What axe finds wrong on the page as it is, a line each; the themes differ in nothing but colour. */
-const faultsOn = async (page: Page, screen: string): Promise<readonly string[]> => {
-  await paint(page, 'day');
-  const inDay = await faultsIn(new AxeBuilder({ page }).withTags(tags), `${screen}, day`);
-  await paint(page, 'melt-room');
-  const contrast = new AxeBuilder({ page }).withRules(['color-contrast']);
-  return [...inDay, ...(await faultsIn(contrast, `${screen}, melt room`))];
-};
 
 const signedIn = async (login: string): Promise<TerminalDriver> => {
   const terminal = await floor.atTerminal();

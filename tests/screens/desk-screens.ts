@@ -5,6 +5,7 @@ import { buildInstructionDraft } from '#tests/factories/build-instruction-draft.
 import { buildApprenticeMelt } from '#tests/support/apprentice-melt.ts';
 import { driveDesk } from '#tests/support/desk-driver.ts';
 import { sizes, type Capture } from './capture.ts';
+import { captureMetal } from './metal-screens.ts';
 
 const ready = async (page: Page): Promise<void> => {
   await page.getByRole('heading', { level: 1 }).waitFor();
@@ -80,6 +81,7 @@ export const captureDesk = async (
   await shoot('/alloys', '35-alloys');
   for (const [index, alloy] of alloys.entries())
     await shoot(`/alloys/${alloy.id}`, `36-alloy-${index + 1}`, true);
+  await captureMetal(page, studio, capture);
   await shoot('/flasks', '37-flasks');
   await shoot('/people', '38-people');
   await shoot('/terminals', '39-terminals');

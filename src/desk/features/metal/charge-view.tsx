@@ -69,7 +69,7 @@ export const PlannedCharge = ({
             {
               term: 'Fineness at the worst',
               value: formatFineness(worstPpt),
-              note: 'by the certificates’ lower bounds',
+              note: 'at lower bounds',
             },
             { term: 'Share of returns', value: shareWords(returnsShare) },
             { term: 'This plan is', value: gapWords(gap) },

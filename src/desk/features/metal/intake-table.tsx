@@ -28,7 +28,8 @@ const Cell = ({
   <td
     className={cx(
       'border-b-2 border-line py-1.5 pr-4 align-top',
-      isFigure && remarks.length === 0 && 'text-right whitespace-nowrap',
+      isFigure && remarks.length === 0 && 'text-right',
+      remarks.length === 0 && text.length <= 24 && 'whitespace-nowrap',
       remarks.length > 0 && 'min-w-48',
     )}
   >

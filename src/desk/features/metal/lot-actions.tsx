@@ -1,5 +1,4 @@
-import { useState } from 'react';
-import { Link } from 'react-router-dom';
+import { Link, useSearchParams } from 'react-router-dom';
 import type { LotDetail } from '#shared/contracts/lot.ts';
 import { buttonClass } from '#src/ui/button-class.ts';
 import { Button } from '#src/ui/button.tsx';
@@ -20,14 +19,17 @@ const offered = ({ abilities, quarantineReason }: LotDetail): readonly (readonly
   return all.flatMap(([act, words, isOffered]) => (isOffered ? [[act, words] as const] : []));
 };
 
-/** What this person may do with a lot, each in a dialog of its own, and its label. */
+/** What this person may do with a lot, each in a dialog of its own that the address can name, and its label. */
 export const LotActions = ({ lot }: { readonly lot: LotDetail }) => {
-  const [open, setOpen] = useState<Act | null>(null);
-  const Open = open === null ? null : lotActs[open];
+  const [search, setSearch] = useSearchParams();
+  const acts = offered(lot);
+  const open = acts.find(([act]) => act === search.get('act'))?.[0];
+  const Open = open === undefined ? null : lotActs[open];
+  const close = (): void => setSearch({}, { replace: true });
   return (
     <div className="screen-only flex flex-wrap gap-3 pb-9">
-      {offered(lot).map(([act, words]) => (
-        <Button key={act} onClick={() => setOpen(act)}>
+      {acts.map(([act, words]) => (
+        <Button key={act} onClick={() => setSearch({ act }, { replace: true })}>
           {words}
         </Button>
       ))}
@@ -35,7 +37,7 @@ export const LotActions = ({ lot }: { readonly lot: LotDetail }) => {
         <Icon name="print" />
         Label
       </Link>
-      {Open ? <Open lot={lot} onClose={() => setOpen(null)} /> : null}
+      {Open ? <Open lot={lot} onClose={close} /> : null}
     </div>
   );
 };

@@ -56,12 +56,18 @@ const CountAct = ({ lot, onClose }: ActProps) => {
   );
 };
 
+/** What a new assay reaches beyond the lot itself. */
+const touchedWords = ({ melts }: LotDetail): string =>
+  melts.length === 0
+    ? ''
+    : ` Its metal went into ${melts.map(({ code }) => code).join(', ')}: look at those again.`;
+
 const AssayAct = ({ lot, onClose }: ActProps) => {
   const amend = useAmendLot(lot.id);
   return (
     <ActForm<AssayValues, z.output<typeof amendLotRequest>>
       title={`New assay of ${lot.code}`}
-      words="What the certificate said stays beside it; from now on the new assay counts."
+      words={`What the certificate said stays beside it; from now on the new assay counts.${touchedWords(lot)}`}
       contract={amendLotRequest}
       reading={assayReading}
       defaults={{ parts: partsOfAssay(lot), reason: '' }}

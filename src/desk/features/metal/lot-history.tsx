@@ -14,6 +14,27 @@ const kindWords: Readonly<Record<AmendmentKind, string>> = {
 const detailOf = ({ compositionWt, toleranceWt, place }: LotAmendment): string =>
   compositionWt ? writeComposition(compositionWt, toleranceWt ?? {}) : (place ?? '');
 
+const linkClass = 'font-extrabold underline decoration-2 underline-offset-4';
+
+/** The melts that hold metal of a lot whose assay changed, and the lots their buttons became. */
+const Touched = ({ lot: { melts, becameLots } }: { readonly lot: LotDetail }) => {
+  if (melts.length === 0) return <span>It touches no melt: none of the lot had been weighed in.</span>;
+  const places = [
+    ...melts.map(({ id, code }) => ({ code, to: `/melts/${id}` })),
+    ...becameLots.map(({ id, code }) => ({ code, to: `/metal/lots/${id}` })),
+  ];
+  return (
+    <span className="flex flex-wrap gap-x-3">
+      It touches
+      {places.map(({ code, to }) => (
+        <Link key={code} to={to} className={linkClass}>
+          {code}
+        </Link>
+      ))}
+    </span>
+  );
+};
+
 /** What was found out or decided about a lot since it came, oldest first. */
 export const LotAmendments = ({ lot }: { readonly lot: LotDetail }) => {
   const { clock } = useStudio();
@@ -29,6 +50,7 @@ export const LotAmendments = ({ lot }: { readonly lot: LotDetail }) => {
               {detail ? `: ${detail}` : ''}
             </span>
             {amendment.reason ? <span>{amendment.reason}</span> : null}
+            {amendment.kind === 'assay' ? <Touched lot={lot} /> : null}
             <span className="text-[15px] text-soft">
               {amendment.person}, {clock.dayAndTime(amendment.at)}
             </span>

@@ -80,6 +80,7 @@ export const LotMovements = ({ lotId }: { readonly lotId: string }) => {
               caption="Movements of the lot"
               align="left"
               heads={['When', 'Who', 'From', 'To', 'Mass', 'What', 'Put right']}
+              figures={[4]}
               rows={movements.map((movement) => ({
                 key: movement.id,
                 cells: [
@@ -95,7 +96,7 @@ export const LotMovements = ({ lotId }: { readonly lotId: string }) => {
                     <button
                       type="button"
                       onClick={() => setWrong(movement)}
-                      className="min-h-8 rounded-md font-extrabold underline decoration-2 underline-offset-4"
+                      className="min-h-6 rounded-md font-extrabold underline decoration-2 underline-offset-4"
                     >
                       Correct
                       <span className="sr-only">

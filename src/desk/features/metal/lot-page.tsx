@@ -11,6 +11,7 @@ import { StateMark } from '#src/ui/state-mark.tsx';
 import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { capitalised, elementName, writeWt } from '#src/desk/parts/element-names.ts';
+import { MarkWords } from '#src/desk/parts/mark-words.tsx';
 import { Panel } from '#src/desk/parts/panel.tsx';
 import { LotActions } from './lot-actions.tsx';
 import { LotDocuments } from './lot-documents.tsx';
@@ -80,6 +81,11 @@ const Summary = ({ lot }: { readonly lot: LotDetail }) => {
   );
 };
 
+const LotMark = ({ lot }: { readonly lot: LotDetail }) => {
+  const fineness = finenessOf(lot);
+  return fineness ? <MarkWords metal={fineness.metal} worstPpt={fineness.worst} /> : null;
+};
+
 const LotView = ({ lot }: { readonly lot: LotDetail }) => {
   const studio = useStudio();
   const nowMs = useNow(60_000);
@@ -105,6 +111,7 @@ const LotView = ({ lot }: { readonly lot: LotDetail }) => {
       <div className="grid gap-x-14 gap-y-12 lg:grid-cols-2">
         <Panel title="What it holds">
           <DefinitionList items={compositionOf(lot, studio)} />
+          <LotMark lot={lot} />
         </Panel>
         <Panel title="Where it is from">
           <DefinitionList items={originOf(lot, studio, nowMs)} />

@@ -1,7 +1,8 @@
 import { createColumnHelper } from '@tanstack/react-table';
 import { useMemo, type ReactNode } from 'react';
 import type { Lot } from '#shared/contracts/lot.ts';
-import { lotKindNames } from '#shared/domain/metal/lot.ts';
+import { formatFineness, lotKindNames } from '#shared/domain/metal/lot.ts';
+import { metalName } from '#shared/domain/metal/metal-name.ts';
 import { useNow } from '#src/lib/use-now.ts';
 import { DataTable } from '#src/ui/data-table.tsx';
 import { StateMark } from '#src/ui/state-mark.tsx';
@@ -9,7 +10,7 @@ import { FlaskCodeText } from '#src/desk/parts/flask-code-text.tsx';
 import { useSortingInAddress } from '#src/desk/parts/use-sorting-in-address.ts';
 import { useStudio, type StudioWriting } from '#src/desk/parts/use-studio.ts';
 import { writeComposition } from '#src/desk/parts/element-names.ts';
-import { ageWords, finenessOf, finenessWords } from './lot-words.ts';
+import { ageWords, finenessOf } from './lot-words.ts';
 
 const column = createColumnHelper<Lot>();
 
@@ -26,19 +27,39 @@ const columnsFor = ({ mass }: StudioWriting, nowMs: number) => [
     cell: ({ getValue }) => <FlaskCodeText code={getValue()} />,
   }),
   column.accessor('name', { header: 'Name', cell: ({ row }) => <NameCell lot={row.original} /> }),
-  column.accessor(({ kind }) => lotKindNames[kind], { id: 'kind', header: 'Kind' }),
+  column.accessor(({ kind }) => lotKindNames[kind], {
+    id: 'kind',
+    header: 'Kind',
+    cell: ({ getValue }) => <span className="whitespace-nowrap">{getValue()}</span>,
+  }),
   column.display({
     id: 'composition',
     header: 'Composition, wt%',
-    cell: ({ row }) => writeComposition(row.original.compositionWt, row.original.toleranceWt),
+    // A symbol and its figure stay on one line.
+    cell: ({ row }) => writeComposition(row.original.compositionWt).replaceAll(/([a-z]) /g, '$1\u00a0'),
   }),
   column.accessor((lot) => finenessOf(lot)?.expected ?? -1, {
     id: 'fineness',
     header: 'Fineness',
     cell: ({ row }) => {
       const fineness = finenessOf(row.original);
-      return fineness ? finenessWords(fineness) : <span className="text-soft">not precious</span>;
+      if (!fineness) return <span className="text-soft">not precious</span>;
+      return (
+        <span className="whitespace-nowrap">
+          <span className="text-soft">{metalName(fineness.metal)}</span> {formatFineness(fineness.expected)}
+        </span>
+      );
     },
+    meta: { align: 'right' },
+  }),
+  column.accessor((lot) => finenessOf(lot)?.worst ?? -1, {
+    id: 'worst',
+    header: 'At worst',
+    cell: ({ row }) => {
+      const fineness = finenessOf(row.original);
+      return fineness ? formatFineness(fineness.worst) : '';
+    },
+    meta: { align: 'right' },
   }),
   column.accessor('balanceG', {
     id: 'balance',
@@ -54,6 +75,7 @@ const columnsFor = ({ mass }: StudioWriting, nowMs: number) => [
     id: 'age',
     header: 'Age',
     cell: ({ row }) => <span className="whitespace-nowrap">{ageWords(row.original.receivedAt, nowMs)}</span>,
+    meta: { align: 'right' },
   }),
 ];
 
@@ -70,7 +92,7 @@ export const LotTable = ({ lots, empty }: LotTableProps) => {
   const [sorting, setSorting] = useSortingInAddress();
   const columns = useMemo(() => columnsFor(studio, nowMs), [studio, nowMs]);
   return (
-    <div className="overflow-x-auto">
+    <div className="overflow-x-auto text-[15px]">
       <DataTable
         caption="Lots of metal"
         hideCaption

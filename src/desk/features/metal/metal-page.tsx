@@ -6,7 +6,7 @@ import { buttonClass } from '#src/ui/button-class.ts';
 import { Icon } from '#src/ui/icon.tsx';
 import { Notice } from '#src/ui/notice.tsx';
 import { PageTitle } from '#src/ui/page-title.tsx';
-import { useDeskSession } from '#src/desk/parts/desk-session.ts';
+import { CrucibleNotice } from '#src/desk/parts/crucible-notice.tsx';
 import { Loaded } from '#src/desk/parts/loaded.tsx';
 import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { LotFilterBar } from './lot-filter-bar.tsx';
@@ -21,22 +21,14 @@ const ReceiveLink = () => (
   </Link>
 );
 
-const Actions = () => {
-  const { person } = useDeskSession();
-  return (
-    <>
-      {person.roles.includes('owner') ? (
-        <Link to="/metal/month" className={buttonClass()}>
-          Month
-        </Link>
-      ) : null}
-      <Link to="/metal/plan" className={buttonClass()}>
-        Plan a charge
-      </Link>
-      <ReceiveLink />
-    </>
-  );
-};
+const Actions = () => (
+  <>
+    <Link to="/metal/intake" className={buttonClass()}>
+      Take in a sheet
+    </Link>
+    <ReceiveLink />
+  </>
+);
 
 const Nothing = ({ isFiltered, onHand }: { readonly isFiltered: boolean } & Pick<LotFilters, 'onHand'>) => {
   if (isFiltered) return <Notice kind="empty" title="No lot is like that. Choose another kind or metal." />;
@@ -65,7 +57,7 @@ const Lots = ({ lots, filters }: { readonly lots: readonly Lot[]; readonly filte
   );
 };
 
-/** The lots of metal on hand, what they come to, and the ways to more metal, a charge and the month. */
+/** The lots of metal on hand, what they come to, what cards have left in crucibles, and the ways to more metal. */
 export const MetalPage = () => {
   const [search] = useSearchParams();
   const filters = filtersOf(search);
@@ -77,6 +69,7 @@ export const MetalPage = () => {
         summary="Every lot with what its certificate says and what is left of it."
         actions={<Actions />}
       />
+      <CrucibleNotice />
       <Loaded query={lots} what="the lots">
         {(list) => <Lots lots={list} filters={filters} />}
       </Loaded>

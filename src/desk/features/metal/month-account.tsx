@@ -24,13 +24,13 @@ export const MonthAccount = ({ caption, lines, metals, total }: MonthAccountProp
   const columns = [...metals, total];
   return (
     <div role="region" aria-label={caption} tabIndex={0} className="overflow-x-auto rounded-md">
-      <table className="w-full">
+      <table className="w-full table-fixed">
         <caption className="pb-2 text-left text-[19px] font-black">
           {caption}, {units.mass}
         </caption>
         <thead>
           <tr>
-            <td className="border-b-[3px] border-ink" />
+            <td className="w-[26%] border-b-[3px] border-ink" />
             {columns.map(({ element }) => (
               <th
                 key={element}

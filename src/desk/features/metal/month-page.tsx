@@ -13,6 +13,7 @@ import { useStudio } from '#src/desk/parts/use-studio.ts';
 import { Panel } from '#src/desk/parts/panel.tsx';
 import { PlainTable } from '#src/desk/parts/plain-table.tsx';
 import { writeExactMass } from './metal-mass.ts';
+import { MonthCounts } from './month-counts.tsx';
 import { MonthAccount } from './month-account.tsx';
 import {
   crucibleLines,
@@ -43,7 +44,8 @@ const Steps = ({ month, current }: { readonly month: string; readonly current: s
       </Link>
     ) : null}
     <a href={reconciliationFile(month, 'pdf')} download className={buttonClass()}>
-      PDF
+      <Icon name="print" />
+      PDF to sign
     </a>
     <a href={reconciliationFile(month, 'csv')} download className={buttonClass()}>
       CSV
@@ -86,36 +88,8 @@ const Losses = ({ caption, rates }: { readonly caption: string; readonly rates: 
   );
 };
 
-const Counts = ({ counts, uncounted }: Pick<Reconciliation, 'counts' | 'uncounted'>) => {
-  const { units, clock } = useStudio();
-  return (
-    <Panel title="Counted on the balance">
-      {counts.length === 0 ? <p className="text-soft">No lot was counted in this month.</p> : null}
-      {counts.length > 0 ? (
-        <PlainTable
-          caption="Lots that were counted"
-          align="left"
-          heads={['Lot', `Ledger, ${units.mass}`, `Counted, ${units.mass}`, 'Difference', 'Why', 'Who']}
-          rows={counts.map(({ code, name, expectedMg, countedMg, explanation, person, at }) => ({
-            key: `${code}-${at}`,
-            cells: [
-              `${code} ${name}`,
-              writeExactMass(expectedMg, units.mass),
-              writeExactMass(countedMg, units.mass),
-              countedMg === expectedMg ? 'none' : writeExactMass(countedMg - expectedMg, units.mass),
-              explanation,
-              `${person}, ${clock.dayAndTime(at)}`,
-            ],
-          }))}
-        />
-      ) : null}
-      {uncounted.length > 0 ? <p>Not counted: {uncounted.join(', ')}.</p> : null}
-    </Panel>
-  );
-};
-
 const MonthView = ({ month }: { readonly month: Reconciliation }) => {
-  const { metals, total, lossByAlloy, lossByCaster, lossByTerminal } = month;
+  const { metals, total, lossByAlloy, lossByCaster, lossByFurnace, lossByTerminal } = month;
   if (metals.length === 0)
     return (
       <Notice kind="empty" title="No metal was on hand or moved in this month.">
@@ -127,13 +101,14 @@ const MonthView = ({ month }: { readonly month: Reconciliation }) => {
       <AddsUp total={total} />
       <MonthAccount caption="Lots" lines={lotLines} metals={metals} total={total} />
       <MonthAccount caption="Crucibles" lines={crucibleLines} metals={metals} total={total} />
-      <Counts counts={month.counts} uncounted={month.uncounted} />
+      <MonthCounts counts={month.counts} uncounted={month.uncounted} />
       {lossByAlloy.length === 0 ? (
         <p className="text-soft">No melt was closed in this month, so nothing is said about loss.</p>
       ) : (
         <div className="grid gap-x-14 gap-y-10 xl:grid-cols-2">
           <Losses caption="Loss by alloy" rates={lossByAlloy} />
           <Losses caption="Loss by caster" rates={lossByCaster} />
+          <Losses caption="Loss by furnace" rates={lossByFurnace} />
           <Losses caption="Loss by terminal" rates={lossByTerminal} />
         </div>
       )}

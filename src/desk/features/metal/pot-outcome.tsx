@@ -32,7 +32,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
   const { lines, totalG, partsWt, expectedPpt, worstPpt } = outcome;
   const mass = (grams: number): string => writeWeighable(grams, units.mass);
   return (
-    <div className="grid gap-x-14 gap-y-8 lg:grid-cols-[minmax(0,1fr)_minmax(0,420px)]">
+    <div className="grid gap-8">
       <div className="grid content-start gap-6">
         {lines.length === 0 ? (
           <StateMark state="ready" text={`It is ${target.name} as it is: nothing is to be added.`} />
@@ -52,7 +52,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
             {
               term: 'Fineness at the worst',
               value: formatFineness(worstPpt),
-              note: 'by the certificates’ lower bounds',
+              note: 'at lower bounds',
             },
             { term: 'Composition then, wt%', value: writeComposition(partsWt) },
           ]}
@@ -61,7 +61,7 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
           Nothing is kept or moved by this: weigh the lots in at the terminal, or count them afterwards.
         </p>
       </div>
-      <div className="grid content-start gap-6">
+      <div className="grid items-end gap-6 sm:grid-cols-2">
         <Crucible
           lots={[
             { key: 'pot', label: 'the pot', kind: 'other', inG: pot.massG, plannedG: pot.massG },
@@ -76,13 +76,15 @@ const Additions = ({ pot, target, outcome }: PotOutcomeProps & { readonly outcom
           wantedG={totalG}
           format={mass}
         />
-        <FinenessScale
-          mark={target.fineness}
-          worst={worstPpt}
-          range={finenessRange(target.fineness, worstPpt)}
-          format={formatFineness}
-        />
-        <MarkWords metal={markedMetal(target.family)} worstPpt={worstPpt} markPpt={target.fineness} />
+        <div className="grid gap-4">
+          <FinenessScale
+            mark={target.fineness}
+            worst={worstPpt}
+            range={finenessRange(target.fineness, worstPpt)}
+            format={formatFineness}
+          />
+          <MarkWords metal={markedMetal(target.family)} worstPpt={worstPpt} markPpt={target.fineness} />
+        </div>
       </div>
     </div>
   );

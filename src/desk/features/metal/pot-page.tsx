@@ -71,8 +71,8 @@ const InThePot = ({ alloys }: WithAlloys) => {
       <div className="grid gap-2">
         <CompositionFields whole={wholeOfLot('grain')} />
         <p className="text-[15px] text-soft">
-          Gold and silver want a tolerance: 0 where nothing is known of it, and then the worst case is no
-          worse than what is typed.
+          Gold and silver want a tolerance: 0 where nothing is known of it; the worst case then rests on the
+          figures as they are typed.
         </p>
       </div>
     </>
@@ -120,9 +120,13 @@ const PotForm = ({ alloys }: WithAlloys) => {
   });
   const target = change.variables ? targetOf(alloys, change.variables.alloyRevisionId) : null;
   return (
-    <div className="grid gap-11">
+    <div className="grid gap-x-14 gap-y-11 xl:grid-cols-[minmax(0,520px)_minmax(0,1fr)]">
       <FormProvider {...form}>
-        <form noValidate onSubmit={(event) => void submit(event)} className="grid max-w-[720px] gap-6">
+        <form
+          noValidate
+          onSubmit={(event) => void submit(event)}
+          className="grid max-w-[720px] content-start gap-6"
+        >
           <InThePot alloys={alloys} />
           <Target alloys={alloys} />
           <FormProblem sentence={form.formState.errors.root?.['server']?.message} />
