@@ -1,4 +1,4 @@
-import type { QueryClient } from '@tanstack/react-query';
+import { notifyManager, type QueryClient } from '@tanstack/react-query';
 import type { RecordEventRequest } from '#shared/contracts/card.ts';
 import { cardQuery, recordEvent } from '#src/api/cards.ts';
 import { sessionQuery } from '#src/api/session.ts';
@@ -12,7 +12,7 @@ export const deliverToServer = (client: QueryClient): Outbox => {
     // The contract's type differs only in that its list of prompts may be changed.
     send: ({ meltId, key, occurredAt, event }) =>
       recordEvent(meltId, { key, occurredAt, event: event as RecordEventRequest['event'] }),
-    onDelivered: ({ castingId }, recorded) => {
+    onDelivered: async ({ castingId }, recorded) => {
       const { queryKey } = cardQuery(castingId);
       // An answer asked for before this event was stored would take the card a step back.
       void client.cancelQueries({ queryKey });
@@ -22,6 +22,8 @@ export const deliverToServer = (client: QueryClient): Outbox => {
           : card,
       );
       void client.invalidateQueries({ queryKey: ['castings'] });
+      // The cache tells its screens a moment later; until then only the outbox shows the event.
+      await new Promise<void>((resolve) => notifyManager.schedule(resolve));
     },
     onRefused: ({ castingId }) => {
       void client.invalidateQueries({ queryKey: cardQuery(castingId).queryKey });

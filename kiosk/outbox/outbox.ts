@@ -23,7 +23,8 @@ export interface OutboxView {
 export interface OutboxOptions {
   readonly store: OutboxStore;
   readonly send: (entry: OutboxEntry) => Promise<MeltEvent>;
-  readonly onDelivered: (entry: OutboxEntry, recorded: MeltEvent) => void;
+  /** The entry is forgotten only once this is done, so that screens never lack it in between. */
+  readonly onDelivered: (entry: OutboxEntry, recorded: MeltEvent) => void | Promise<void>;
   readonly onRefused: (entry: OutboxEntry) => void;
   /** The server no longer knows who is at this terminal. */
   readonly onSignedOut: () => void;
@@ -124,7 +125,7 @@ export class Outbox {
   private async attempt(entry: OutboxEntry): Promise<boolean> {
     try {
       const recorded = await this.options.send(entry);
-      this.options.onDelivered(entry, recorded);
+      await this.options.onDelivered(entry, recorded);
       await this.forget(entry);
       return true;
     } catch (error) {
