@@ -12,7 +12,7 @@ export const deliverToServer = (client: QueryClient): Outbox => {
     // The contract's type differs only in that its list of prompts may be changed.
     send: ({ meltId, key, occurredAt, event }) =>
       recordEvent(meltId, { key, occurredAt, event: event as RecordEventRequest['event'] }),
-    onDelivered: ({ castingId }, recorded) => {
+    onDelivered: async ({ castingId }, recorded) => {
       const { queryKey } = cardQuery(castingId);
       // An answer asked for before this event was stored would take the card a step back.
       void client.cancelQueries({ queryKey });
