@@ -71,7 +71,7 @@ const Losses = ({ caption, rates }: { readonly caption: string; readonly rates: 
   return (
     <Panel title={caption}>
       <PlainTable
-        caption={caption}
+        caption={`${caption}, in figures`}
         heads={['Name', 'Melts', `Metal in, ${units.mass}`, `Lost, ${units.mass}`, 'Lost']}
         rows={rates.map((rate) => ({
           key: rate.name,
