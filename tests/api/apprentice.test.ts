@@ -5,6 +5,7 @@ import type { Person } from '#shared/contracts/person.ts';
 import { buildAlloyRevision } from '#tests/factories/build-alloy-revision.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildUser } from '#tests/factories/build-user.ts';
+import { enforceShippedInstruction } from '#tests/factories/enforce-shipped-instruction.ts';
 import { askForCard } from '#tests/support/ask-for-card.ts';
 import { driveCard, leadToFlaskOut } from '#tests/support/drive-card.ts';
 import { problemIdOf, sentenceOf } from '#tests/support/problem-id.ts';
@@ -14,6 +15,7 @@ let server: TestServer;
 let owner: SignedInClient;
 beforeAll(async () => {
   server = await startTestServer();
+  await enforceShippedInstruction(server.services);
   owner = await server.deskAs('owner');
 });
 afterEach(() => server.expectNoSurprises());

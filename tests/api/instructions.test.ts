@@ -5,6 +5,7 @@ import { defaultInstruction } from '#shared/domain/instruction/default-instructi
 import type { InstructionStep } from '#shared/domain/instruction/instruction-step.ts';
 import type { WorkInstruction } from '#shared/domain/instruction/work-instruction.ts';
 import { cardSteps } from '#shared/domain/pour-card/card-step.ts';
+import { guardOnly } from '#tests/factories/build-studio.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildInstructionDraft } from '#tests/factories/build-instruction-draft.ts';
 import { openCard } from '#tests/support/ask-for-card.ts';
@@ -75,7 +76,7 @@ describe('a revision of the work instruction', () => {
     expect(begun).toMatchObject({
       status: 'draft',
       draftedBy: owner.user.name,
-      content: defaultInstruction,
+      content: guardOnly,
       approval: 'own-draft',
       abilities: { draft: true, change: true, drop: true, approve: false },
     });

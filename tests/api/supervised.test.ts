@@ -4,6 +4,7 @@ import type { Melt } from '#shared/contracts/melt.ts';
 import type { SupervisedStep } from '#shared/contracts/supervised.ts';
 import { buildCasting } from '#tests/factories/build-casting.ts';
 import { buildUser } from '#tests/factories/build-user.ts';
+import { enforceShippedInstruction } from '#tests/factories/enforce-shipped-instruction.ts';
 import { driveCard, leadToFlaskOut, type DrivenCard } from '#tests/support/drive-card.ts';
 import { problemIdOf } from '#tests/support/problem-id.ts';
 import {
@@ -23,6 +24,7 @@ let signerName: string;
 /** A pour by an apprentice, signed for by a caster, with a departure whose reason the caster signs as well. */
 beforeAll(async () => {
   server = await startTestServer();
+  await enforceShippedInstruction(server.services);
   owner = await server.deskAs('owner');
   apprentice = await server.terminalAs('apprentice');
   const signer = await buildUser(server.services, { name: '=Signer "one"', roles: ['caster'] });

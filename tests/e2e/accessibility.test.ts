@@ -204,7 +204,6 @@ it.each(['g', 'dwt', 'ozt'] as const)(
     await models.Casting.update({ state: 'holding' }, { where: { state: ['dewaxed', 'invested'] } });
     const terminal = await signedIn('ines');
     const card = await cardAhead(terminal.page, studio, flask, 'charge');
-    for (const event of checksBefore('charge', card.context)) await card.deliver(event);
     await terminal.openCard(card.castingId);
     await terminal.withoutLots();
     await settle(terminal.page);

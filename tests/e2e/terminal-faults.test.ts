@@ -55,7 +55,6 @@ describe('a terminal in trouble', () => {
     const context = terminal.page.context();
     const { castingId, meltId } = await cardAhead(terminal.page, studio, 147, 'charge');
     await terminal.openCard(castingId);
-    await terminal.readOn();
     await terminal.withoutLots();
     await waitFor('the reading in the melt book', () => isIdle(terminal));
     await studio.suspend();
@@ -85,7 +84,6 @@ describe('a terminal in trouble', () => {
     const { page } = terminal;
     const { castingId, meltId } = await cardAhead(page, studio, 122, 'charge');
     await terminal.openCard(castingId);
-    await terminal.readOn();
     await waitFor('the reading in the melt book', () => isIdle(terminal));
     let sent = 0;
     await page.route('**/api/melts/*/events', async (route) => {

@@ -114,7 +114,6 @@ describe('what a terminal refuses', () => {
     const { page } = terminal;
     const card = await cardAhead(page, studio, 122, 'charge');
     await terminal.openCard(card.castingId);
-    await terminal.readOn();
     await terminal.withoutLots();
     await terminal.button('Grain in').click();
     await terminal.heading(/How much/).waitFor();

@@ -119,7 +119,6 @@ describe('a shift at the terminal', () => {
     const { page } = terminal;
     const { castingId, meltId } = await cardAhead(page, studio, 161, 'charge');
     await terminal.openCard(castingId);
-    await terminal.readOn();
     await waitFor('what was read in the melt book', async () =>
       (await eventsOf(meltId)).some(({ event }) => event.type === 'checked'),
     );

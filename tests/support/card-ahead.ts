@@ -3,7 +3,7 @@ import type { APIResponse, Page } from 'playwright-core';
 import type { PourCard } from '#shared/contracts/card.ts';
 import type { CardContext } from '#shared/domain/pour-card/card-state.ts';
 import { buildFlaskCode } from '#shared/lib/codes.ts';
-import { eventsTo, type ReachableStep } from '#tests/factories/card-events.ts';
+import { checksBefore, eventsTo, type ReachableStep } from '#tests/factories/card-events.ts';
 import { askThrough } from './ask-through.ts';
 import type { ServedStudio } from './served-studio.ts';
 
@@ -39,6 +39,7 @@ export const cardAhead = async (
   if (!melt) throw new Error('The card was opened and has no melt.');
   const deliver = (event: object): Promise<APIResponse> =>
     ask.post(`/api/melts/${melt.id}/events`, { ...stamp(), event });
-  for (const event of eventsTo(step, context)) await bodyOf(await deliver(event));
+  const checks = step === 'guard' || step === 'done' ? [] : checksBefore(step, context);
+  for (const event of [...eventsTo(step, context), ...checks]) await bodyOf(await deliver(event));
   return { castingId, meltId: melt.id, plannedG: context.plannedMetalG, context, deliver };
 };

@@ -34,7 +34,8 @@ export const buildRequestTargets = async (
   server: TestServer,
 ): Promise<Readonly<Record<string, RequestTarget>>> => {
   const { services } = server;
-  const owner = (await server.deskAs('owner')).client;
+  const asking = await server.deskAs('owner');
+  const owner = asking.client;
   const furnace = await server.terminalAs('caster');
   const terminal = furnace.client;
   const person = await buildUser(services);
@@ -42,7 +43,8 @@ export const buildRequestTargets = async (
   const moving = await buildCasting(services, { state: 'invested' });
   const draft = await buildAlloyRevision(services, { status: 'draft' });
   const instruction = await buildInstructionDraft(services);
-  const approvable = await buildInstructionDraft(services);
+  // Of the one who asks, so that it stays a draft whatever is sent.
+  const approvable = await buildInstructionDraft(services, { draftedBy: asking.user.id });
   const melt = await buildMelt(services, { user: furnace.user, terminal: furnace.terminal, step: 'charge' });
   const device = server.atTerminal(furnace.token);
   const studio = {
