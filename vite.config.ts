@@ -54,7 +54,6 @@ export default defineConfig({
           retry: 1,
           testTimeout: 180_000,
           hookTimeout: 120_000,
-          fileParallelism: false,
         },
       },
       {

@@ -82,7 +82,7 @@ describe('the work instruction at the desk', () => {
     await page.getByText('Not stored yet.').waitFor();
 
     // Leaving is asked about, and staying loses nothing.
-    await page.getByRole('link', { name: 'Melt book' }).click();
+    await page.getByRole('link', { name: 'Casting' }).click();
     await page.getByRole('button', { name: 'Stay here' }).click();
     await row.waitFor();
 

@@ -91,6 +91,7 @@ const pourOut = async (terminal: TerminalDriver): Promise<void> => {
   const { page } = terminal;
   await terminal.read('980');
   await terminal.hold(/Ready\. Hold/);
+  await terminal.readOn();
   await terminal.hold('Flask is out. Hold');
   await terminal.heading(/Pour now/).waitFor();
   await terminal.hold(/^Poured/);

@@ -130,6 +130,7 @@ describe('a shift at the terminal', () => {
     await waitFor('the hand-over in the melt book', async () =>
       (await eventsOf(meltId)).some(({ event, person }) => event.type === 'carried-on' && person === name),
     );
+    await terminal.withoutLots();
     await terminal.weighIn('Grain', '20');
     await waitFor('the weighing in the melt book', async () =>
       (await eventsOf(meltId)).some(
@@ -159,6 +160,7 @@ describe('a shift at the terminal', () => {
     await page.getByText('Practice: nothing is recorded').waitFor();
     await terminal.guard();
     await terminal.readOn();
+    await terminal.withoutLots();
     await terminal.weighIn('Grain', '20');
     await page.getByText(/20\.00\sg is in/).waitFor();
     await page.getByText('Practice: nothing is recorded').waitFor();
