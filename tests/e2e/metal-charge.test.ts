@@ -5,6 +5,7 @@ import { cardAhead } from '#tests/support/card-ahead.ts';
 import { driveCharge } from '#tests/support/charge-driver.ts';
 import { installFakeSerial } from '#tests/support/fake-serial.ts';
 import { demoLot, planChargeFor } from '#tests/support/plan-charge-for.ts';
+import { pourOut } from '#tests/support/pour-out.ts';
 import { makeQrVideo } from '#tests/support/qr-video.ts';
 import { serveStudio, type ServedStudio } from '#tests/support/served-studio.ts';
 import type { TerminalDriver } from '#tests/support/terminal-driver.ts';
@@ -87,22 +88,6 @@ const balanceMg = async (lot: Lot): Promise<number> => (await lot.reload()).bala
 const numberOn = async ({ page }: TerminalDriver): Promise<string> =>
   (await page.locator('h1 + p > span').first().innerText()).trim();
 
-const pourOut = async (terminal: TerminalDriver): Promise<void> => {
-  const { page } = terminal;
-  await terminal.read('980');
-  await terminal.hold(/Ready\. Hold/);
-  await terminal.readOn();
-  await terminal.hold('Flask is out. Hold');
-  await terminal.heading(/Pour now/).waitFor();
-  await terminal.hold(/^Poured/);
-  await page.getByText(/Wait until/).waitFor();
-  studio.advance(21 * 60);
-  await page.reload();
-  await terminal.hold('Quenched. Hold');
-  await terminal.close('9.1', '0.2');
-  await terminal.heading(/Done\. It is melt M-/).waitFor();
-};
-
 describe('a charge weighed in lot by lot', () => {
   it('goes by its plan, corrects an over-weigh, and leaves a button that is a lot', async () => {
     const { fineG, masterG } = await planFor147();
@@ -145,11 +130,14 @@ describe('a charge weighed in lot by lot', () => {
 
     await terminal.heading(/The whole charge is in/).waitFor();
     await charge.close();
-    await pourOut(terminal);
+    await pourOut(terminal, studio);
 
     const { models } = studio.services;
     const totalMg = inMg(54 + overG + correctedG);
-    const movements = await models.MetalMovement.findAll({ where: { meltId }, order: [['id', 'ASC']] });
+    const read = () => models.MetalMovement.findAll({ where: { meltId }, order: [['id', 'ASC']] });
+    // The terminal is done before the server has the last record.
+    await waitFor('the close in the ledger', async () => (await read()).some(({ kind }) => kind === 'cast'));
+    const movements = await read();
     expect(movements.map(({ kind, massMg }) => [kind, massMg])).toEqual([
       ['weighed-in', 20_000],
       ['weighed-in', 34_000],

@@ -176,6 +176,7 @@ describe('an owner’s metal at the desk', () => {
     const added = await page
       .getByText('Added', { exact: true })
       .locator('xpath=following-sibling::dd')
+      .first()
       .innerText();
     expect(thousandthsOf(added)).toBeGreaterThan(10_000);
 
