@@ -28,11 +28,11 @@ export interface TerminalFrameProps {
   readonly actions: ReactNode;
 }
 
-const code = /([A-Z]-\d{4,6}-\d)/;
+const whole = /([A-Z]-\d{4,6}-\d|\d+ °[CF])/;
 
-/** Text whose codes, such as M-0006-3, stay on one line. */
+/** Text whose codes, such as M-0006-3, and temperatures stay on one line. */
 const unbroken = (text: string): ReactNode =>
-  text.split(code).map((part, index) =>
+  text.split(whole).map((part, index) =>
     index % 2 === 1 ? (
       <span key={index} className="whitespace-nowrap">
         {part}

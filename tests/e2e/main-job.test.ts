@@ -5,6 +5,7 @@ import { buildFlaskCode } from '#shared/lib/codes.ts';
 import { meltingRange, solidFractionAt } from '#shared/metallurgy/index.ts';
 import { launchChromium } from '#tests/support/chromium.ts';
 import { driveDesk } from '#tests/support/desk-driver.ts';
+import { pourOut } from '#tests/support/pour-out.ts';
 import { makeQrVideo } from '#tests/support/qr-video.ts';
 import { serveStudio, type ServedStudio } from '#tests/support/served-studio.ts';
 import { driveTerminal, type TerminalDriver } from '#tests/support/terminal-driver.ts';
@@ -91,18 +92,7 @@ const walkCard = async (terminal: TerminalDriver, job: Job) => {
   await terminal.read(String(pourC));
   // The terminal crashes here; it comes back to the same step with nothing lost.
   await page.reload();
-  await terminal.hold(/Ready\. Hold/);
-  await terminal.readOn();
-  await terminal.hold('Flask is out. Hold');
-  await terminal.heading(/Pour now/).waitFor();
-  await terminal.hold(/^Poured/);
-
-  await page.getByText(/Wait until/).waitFor();
-  studio.advance(21 * 60);
-  await page.reload();
-  await terminal.hold('Quenched. Hold');
-  await terminal.close('9.1', '0.2');
-  await terminal.heading(/Done\. It is melt M-/).waitFor();
+  await pourOut(terminal, studio);
   return { metalInG: returnsG + grainG, pourC, castG: returnsG + grainG - 9.3 };
 };
 

@@ -130,6 +130,7 @@ describe('a charge weighed in lot by lot', () => {
 
     await terminal.heading(/The whole charge is in/).waitFor();
     await charge.close();
+    await terminal.read('980');
     await pourOut(terminal, studio);
 
     const { models } = studio.services;

@@ -96,6 +96,7 @@ describe('the way of metal through the studio', () => {
     const restMg = await weighInTheRest(terminal);
     expect(restMg).toBeLessThan(plannedRestMg);
     await charge.close();
+    await terminal.read('980');
     await pourOut(terminal, studio);
 
     const { MetalMovement, Lot } = studio.services.models;

@@ -1,10 +1,9 @@
 import type { ServedStudio } from './served-studio.ts';
 import type { TerminalDriver } from './terminal-driver.ts';
 
-/** Takes a card from its closed charge to its end: read at 980 °C, poured, quenched in time, 9.1 g of button, 0.2 g lost. */
+/** Takes a card whose melt is ready to its end: poured, quenched in time, 9.1 g of button, 0.2 g lost. */
 export const pourOut = async (terminal: TerminalDriver, studio: ServedStudio): Promise<void> => {
   const { page } = terminal;
-  await terminal.read('980');
   await terminal.hold(/Ready\. Hold/);
   await terminal.readOn();
   await terminal.hold('Flask is out. Hold');

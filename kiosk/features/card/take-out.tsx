@@ -63,17 +63,17 @@ export const TakeOut = ({ running, advised, onDone }: TakeOutProps) => {
       }}
     >
       {choices.length > 1 ? (
-        <div role="group" aria-label="What comes out" className="flex flex-wrap gap-4">
+        <div role="group" aria-label="What comes out" className="flex flex-wrap gap-3">
           {choices.map((choice) => (
             <Button
               key={choice.key}
               size="terminal"
-              className="!min-h-18 !px-5"
+              className="!min-h-18 !px-3 !text-[20px]"
               aria-pressed={choice.key === chosen.key}
               icon={choice.key === chosen.key ? 'tick' : undefined}
               onClick={() => setKey(choice.key)}
             >
-              {choice.words}
+              {choice.lot?.code ?? choice.words}
             </Button>
           ))}
         </div>

@@ -1,4 +1,4 @@
-import { useEffect, useRef } from 'react';
+import { useEffect, useEffectEvent, useRef } from 'react';
 import type { Casting } from '#shared/contracts/casting.ts';
 import { describeCastingState } from '#shared/domain/casting/casting-state.ts';
 import { splitCode } from '#shared/lib/codes.ts';
@@ -39,11 +39,14 @@ export const DayTimeline = ({ day, on, nowMs, selectedId, onSelect }: DayTimelin
   const { clock } = useStudio();
   const layout = layOutDay(day, on, clock, nowMs, available);
   const isKnown = available > 0;
-  useEffect(() => {
+  // On a narrow screen the picture opens around now, not at dawn.
+  const openAroundNow = useEffectEvent(() => {
     const { current } = frame;
-    // On a narrow screen the picture opens around now, not at dawn.
-    if (isKnown && current && nowMs !== null) current.scrollLeft = layout.x(nowMs) - current.clientWidth / 2;
-    // eslint-disable-next-line react-hooks/exhaustive-deps -- once for each day: later it stays where it was scrolled to
+    if (current && nowMs !== null) current.scrollLeft = layout.x(nowMs) - current.clientWidth / 2;
+  });
+  // Once for each day: later it stays where it was scrolled to.
+  useEffect(() => {
+    if (isKnown) openAroundNow();
   }, [isKnown, on]);
   const words = (casting: Casting): string =>
     [
